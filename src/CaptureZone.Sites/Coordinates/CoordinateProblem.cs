@@ -34,12 +34,14 @@ internal static class CoordinateProblem
             $"{Quote(stated)} is web mercator, whose metres are not metres on the ground; {UtmHint}",
         _ when GeographicName(code) is { } name =>
             $"{Quote(stated)} is longitude/latitude ({name}), not a plane system in metres or feet; {UtmHint}",
-        _ => $"{Quote(stated)} is not among the codes that are known (UTM zones: EPSG:32601-32660, 32701-32760, 26901-26923, 25828-25838); {FileHint}",
+        _ => $"{Quote(stated)} is not among the codes that are known (UTM zones: EPSG:32601-32660, 32701-32760, 26901-26923, "
+            + $"25828-25838); {FileHint}",
     };
 
     /// <summary>A file that is not there.</summary>
     public static string FileMissing(string stated) =>
-        $"{Quote(stated)} was not found (looked for from the site file's folder); put the file there, or give an EPSG code such as \"EPSG:32614\"";
+        $"{Quote(stated)} was not found (looked for from the site file's folder); put the file there, or give an EPSG code such as "
+        + "\"EPSG:32614\"";
 
     /// <summary>A file that cannot be read, or is no definition by its size.</summary>
     public static string FileUnreadable(string stated) =>

@@ -37,7 +37,8 @@ public static class CoordinateSystems
     public static string? FileOf(string stated, string folder)
     {
         string trimmed = stated.Trim();
-        bool isFile = trimmed.EndsWith(".prj", StringComparison.OrdinalIgnoreCase) || trimmed.EndsWith(".wkt", StringComparison.OrdinalIgnoreCase);
+        bool isFile = trimmed.EndsWith(".prj", StringComparison.OrdinalIgnoreCase)
+            || trimmed.EndsWith(".wkt", StringComparison.OrdinalIgnoreCase);
         return isFile ? Path.Combine(folder, trimmed) : null;
     }
 
@@ -84,7 +85,7 @@ public static class CoordinateSystems
                 ? (null, CoordinateProblem.FileUnreadable(stated))
                 : FromText(stated, File.ReadAllText(path).Trim());
         }
-        catch (Exception e) when (e is IOException or UnauthorizedAccessException or SecurityException or ArgumentException or NotSupportedException)
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException or SecurityException or ArgumentException)
         {
             return (null, CoordinateProblem.FileUnreadable(stated));
         }
