@@ -6,7 +6,20 @@ internal sealed class EdgeChains(int edges)
 {
     private const int None = -1;
     private readonly int[] _neighbours = NoneOf(2 * edges);
+    private readonly bool[] _told = new bool[edges];
     private readonly List<int> _linked = [];
+
+    /// <summary>Takes all links away.</summary>
+    public void Clear()
+    {
+        foreach (int edge in _linked)
+        {
+            _neighbours[2 * edge] = _neighbours[2 * edge + 1] = None;
+            _told[edge] = false;
+        }
+
+        _linked.Clear();
+    }
 
     /// <summary>Links two edges.</summary>
     /// <param name="a">One.</param>
@@ -20,20 +33,19 @@ internal sealed class EdgeChains(int edges)
     /// <summary>All chains, edge by edge; a closed one ends with the edge it begins with. Each is told once.</summary>
     public IEnumerable<List<int>> All()
     {
-        bool[] told = new bool[edges];
         foreach (int end in _linked.Where(edge => _neighbours[2 * edge + 1] == None))
         {
-            if (!told[end])
+            if (!_told[end])
             {
-                yield return Follow(end, told);
+                yield return Follow(end);
             }
         }
 
         foreach (int edge in _linked)
         {
-            if (!told[edge])
+            if (!_told[edge])
             {
-                List<int> chain = Follow(edge, told);
+                List<int> chain = Follow(edge);
                 chain.Add(edge);
                 yield return chain;
             }
@@ -60,15 +72,15 @@ internal sealed class EdgeChains(int edges)
         }
     }
 
-    private List<int> Follow(int from, bool[] told)
+    private List<int> Follow(int from)
     {
         List<int> chain = [];
         for (int edge = from; edge != None;)
         {
-            told[edge] = true;
+            _told[edge] = true;
             chain.Add(edge);
             int one = _neighbours[2 * edge], other = _neighbours[2 * edge + 1];
-            edge = !told[one] ? one : other != None && !told[other] ? other : None;
+            edge = !_told[one] ? one : other != None && !_told[other] ? other : None;
         }
 
         return chain;

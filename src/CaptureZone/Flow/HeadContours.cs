@@ -9,8 +9,8 @@ namespace CaptureZone.Flow;
 public sealed record HeadContourMap(ImmutableArray<HeadContour> Contours, double Interval);
 
 /// <summary>
-/// Lines of equal head in a frame, at round heads. Every vertex lies on its head to <see cref="LevelLine.Residual"/>; where the aquifer
-/// is dry the lines are cut.
+/// Lines of equal head in a frame, at round heads. Every vertex lies on its head to <see cref="LevelLine.Residual"/>; none lies
+/// where the aquifer is dry.
 /// </summary>
 public static class HeadContours
 {

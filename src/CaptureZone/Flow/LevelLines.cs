@@ -5,7 +5,8 @@ namespace CaptureZone.Flow;
 
 /// <summary>
 /// Lines of one head over a grid, by marching squares: a line enters and leaves each cell through edges whose ends lie on different
-/// sides of the head; of the two ways through a saddle cell its centre decides.
+/// sides of the head; of the two ways through a saddle cell its centre decides. A dry place counts as below every head: heads fall to
+/// the base at its edge, so that no line enters it.
 /// </summary>
 /// <param name="field">The flow.</param>
 /// <param name="grid">Its heads.</param>
@@ -19,50 +20,47 @@ internal sealed class LevelLines(FlowField field, HeadGrid grid)
 
     private const int None = -1;
 
+    private readonly EdgeChains _chains = new(grid.Columns * (grid.Rows + 1) + (grid.Columns + 1) * grid.Rows);
+
     /// <summary>The lines of a head, m; a closed one ends at the place where it begins.</summary>
     /// <param name="level">The head, m elevation.</param>
     public ImmutableArray<ImmutableArray<Complex>> At(double level)
     {
         LevelLine line = new(field, level);
-        EdgeChains chains = new(grid.Columns * (grid.Rows + 1) + (grid.Columns + 1) * grid.Rows);
+        _chains.Clear();
         for (int row = 0; row < grid.Rows; row++)
         {
             for (int column = 0; column < grid.Columns; column++)
             {
-                LinkThrough(column, row, level, chains);
+                LinkThrough(column, row, level);
             }
         }
 
         return
         [
-            .. chains.All()
+            .. _chains.All()
                 .Select(chain => Smooth(line, [.. chain.Select(edge => Vertex(line, level, edge))]))
                 .Where(vertices => vertices.Length > 1),
         ];
     }
 
-    private void LinkThrough(int column, int row, double level, EdgeChains chains)
+    private void LinkThrough(int column, int row, double level)
     {
         double southWest = grid.Head(column, row), southEast = grid.Head(column + 1, row);
         double northWest = grid.Head(column, row + 1), northEast = grid.Head(column + 1, row + 1);
-        if (double.IsNaN(southWest + southEast + northWest + northEast))
-        {
-            return;
-        }
-
         bool sw = southWest > level, se = southEast > level, nw = northWest > level, ne = northEast > level;
         int south = sw != se ? Eastward(column, row) : None, north = nw != ne ? Eastward(column, row + 1) : None;
         int west = sw != nw ? Northward(column, row) : None, east = se != ne ? Northward(column + 1, row) : None;
         if (south >= 0 && north >= 0 && west >= 0 && east >= 0)
         {
             bool cutsSouthEast = field.HeadAt((grid.Node(column, row) + grid.Node(column + 1, row + 1)) / 2) > level == sw;
-            chains.Link(south, cutsSouthEast ? east : west);
-            chains.Link(north, cutsSouthEast ? west : east);
+            _chains.Link(south, cutsSouthEast ? east : west);
+            _chains.Link(north, cutsSouthEast ? west : east);
         }
         else if (Math.Max(Math.Max(south, north), Math.Max(west, east)) is int one and not None)
         {
             int other = south + north + west + east - one - 2 * None;
-            chains.Link(one, other);
+            _chains.Link(one, other);
         }
     }
 
@@ -78,7 +76,7 @@ internal sealed class LevelLines(FlowField field, HeadGrid grid)
         int column = index % width, row = index / width;
         int endColumn = isEastward ? column + 1 : column, endRow = isEastward ? row : row + 1;
         double start = grid.Head(column, row), end = grid.Head(endColumn, endRow);
-        double share = (level - start) / (end - start);
+        double share = double.IsNaN(start + end) ? 0.5 : (level - start) / (end - start);
         return start > level
             ? line.Between(grid.Node(endColumn, endRow), grid.Node(column, row), 1 - share)
             : line.Between(grid.Node(column, row), grid.Node(endColumn, endRow), share);
