@@ -64,7 +64,7 @@ public static class SiteAnalysis
 
         progress?.Report(new Step("heads and checks", 0.9));
         KnownHeadInfluence? knownHead = KnownHeadInfluence.Of(levels, field);
-        HeadContourSet contours = HeadContours.Find(field, framing.Extent, questions.HeadUnit);
+        HeadContourMap contours = HeadContours.Find(field, framing.Extent, questions.HeadUnit);
         return new SiteAnswers
         {
             Field = field,

@@ -26,7 +26,7 @@ internal static class WellZones
         Geometry inExtent = GeometryKit.Intersection(polygon, extent);
         Geometry edges = ZoneEdges.Of(polygon, map);
         ImmutableArray<SourceShare> shares = WaterOrigins.Shares(stretches);
-        bool open = shares.Any(share => share.Source.Kind == FateKind.Far);
+        bool open = shares.Any(share => share.Source.Kind == FateKind.Far) || ZoneEdges.TouchFrame(polygon, map);
         double uniform = Complex.Abs(topology.Field.UniformDischarge);
         double fromFar = shares.Where(share => share.Source.Kind == FateKind.Far).Sum(share => share.Rate);
         return new WellZone(

@@ -85,7 +85,7 @@ public static class PlumeJudge
         GeometryKit.Factory.CreateLineString([.. branch.Points.Select(point => GeometryKit.ToCoordinate(point.At))]);
 
     private static double Fraction(Plume plume, Geometry zone) =>
-        !zone.EnvelopeInternal.Intersects(plume.Outline.EnvelopeInternal) ? 0 : GeometryKit.Intersection(plume.Outline, zone).Area / plume.Outline.Area;
+        !zone.EnvelopeInternal.Intersects(plume.Outline.EnvelopeInternal) ? 0 : Math.Min(GeometryKit.Intersection(plume.Outline, zone).Area / plume.Outline.Area, 1);
 
     private static ArrivalTimes? Arrival(FlowTopology topology, Geometry captured, double retardation, Func<Fate, bool> isChosen)
     {
