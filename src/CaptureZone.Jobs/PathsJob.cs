@@ -1,0 +1,59 @@
+using System.Collections.Immutable;
+using System.Numerics;
+using CaptureZone.Jobs.Points;
+using CaptureZone.Sites;
+using CaptureZone.Topology;
+using CaptureZone.Tracing;
+
+namespace CaptureZone.Jobs;
+
+/// <summary>How paths are followed.</summary>
+/// <param name="Sense">With the water or against it.</param>
+/// <param name="Longest">Largest travel time of water, d; infinite for no limit.</param>
+public sealed record PathsRequest(Sense Sense, double Longest);
+
+/// <summary>The path of a water particle from a point.</summary>
+/// <param name="Start">The point.</param>
+/// <param name="End">How it ends; the place in local metres.</param>
+/// <param name="Points">Its vertices with the time at each, in the order in which it was followed; local metres.</param>
+public sealed record PathRow(NamedPoint Start, PathEnd End, ImmutableArray<PathPoint> Points);
+
+/// <summary>Paths of water from points.</summary>
+public static class PathsJob
+{
+    /// <summary>Follows the path from each point.</summary>
+    /// <param name="site">The site.</param>
+    /// <param name="points">The points.</param>
+    /// <param name="request">How.</param>
+    /// <param name="work">Who does it.</param>
+    /// <exception cref="InputRefusedException">A well takes more than the aquifer yields.</exception>
+    /// <exception cref="OperationCanceledException">The work was stopped.</exception>
+    public static ImmutableArray<PathRow> Follow(
+        SiteDocument site, ImmutableArray<NamedPoint> points, PathsRequest request, Work work)
+    {
+        Tracer tracer = new(SiteFlow.Solve(site));
+        PathRow[] rows = new PathRow[points.Length];
+        int done = 0;
+        work.Workers.For(rows.Length, i =>
+        {
+            work.Cancel.ThrowIfCancellationRequested();
+            rows[i] = Follow(tracer, site, points[i], request);
+            work.Progress?.Report(new Step("following paths", (double)Interlocked.Increment(ref done) / rows.Length));
+        });
+        return [.. rows];
+    }
+
+    private static PathRow Follow(Tracer tracer, SiteDocument site, NamedPoint point, PathsRequest request)
+    {
+        Vertices vertices = new();
+        PathEnd end = tracer.Trace(site.Frame.ToLocal(point.X, point.Y), request.Sense, request.Longest, vertices);
+        return new PathRow(point, end, [.. vertices.Points]);
+    }
+
+    private sealed class Vertices : IPathSink
+    {
+        public List<PathPoint> Points { get; } = [];
+
+        public void Add(Complex at, double time) => Points.Add(new PathPoint(at, time));
+    }
+}
