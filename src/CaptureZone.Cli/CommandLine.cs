@@ -10,17 +10,28 @@ public static class CommandLine
     /// <summary>The program's name.</summary>
     internal const string Name = "capturezone";
 
+    /// <summary>How arguments are read: each means itself, one that begins with @ too.</summary>
+    internal static readonly ParserConfiguration Parsing = new() { ResponseFileTokenReplacer = null, EnablePosixBundling = false };
+
     /// <summary>Runs one command.</summary>
     /// <param name="args">The arguments.</param>
     /// <param name="surroundings">The world around.</param>
     /// <returns>The exit code.</returns>
     public static int Run(IReadOnlyList<string> args, Surroundings surroundings)
     {
-        ParseResult line = Build(surroundings).Parse(args, new ParserConfiguration
+        Command root = Build(surroundings);
+        if (Completion.IsAsked(args))
         {
-            ResponseFileTokenReplacer = null, // an argument that begins with @ means itself
-            EnablePosixBundling = false,
-        });
+            return Completion.Answer(root, args, surroundings.Output);
+        }
+
+        if (args.Count == 0)
+        {
+            root.Parse(["--help"], Parsing).Invoke(new InvocationConfiguration { Output = surroundings.Error });
+            return ExitCode.Wrong;
+        }
+
+        ParseResult line = root.Parse(args, Parsing);
         InvocationConfiguration configuration = new()
         {
             Output = surroundings.Output,
@@ -31,9 +42,11 @@ public static class CommandLine
         return line.Action is ParseErrorAction errors ? Complain(line, errors, surroundings) : line.Invoke(configuration);
     }
 
-    private static RootCommand Build(Surroundings surroundings)
+    private static Command Build(Surroundings surroundings)
     {
-        RootCommand root = new(
+        // Not a RootCommand: that one takes its name from the file that the program lies in.
+        Command root = new(
+            Name,
             "Screening-level analysis of ground-water capture zones: from one site file to zones, maps, GIS files and a memo.");
         root.Options.Add(CommonOptions.Quiet);
         root.Options.Add(CommonOptions.NoColor);
@@ -60,7 +73,7 @@ public static class CommandLine
         errors.ShowHelp = false;
         line.Invoke(new InvocationConfiguration { Output = error, Error = TextWriter.Null, EnableDefaultExceptionHandler = false });
         Command command = line.CommandResult.Command;
-        error.WriteLine($"Try: {Name} {(command is RootCommand ? "" : command.Name + " ")}--help");
+        error.WriteLine($"Try: {Name} {(command.Name == Name ? "" : command.Name + " ")}--help");
         return ExitCode.Wrong;
     }
 }

@@ -38,12 +38,12 @@ internal static class Help
 
     /// <summary>Adds examples and exit codes to the help of a root command and of all below it.</summary>
     /// <param name="root">The root command.</param>
-    public static void AddTo(RootCommand root)
+    public static void AddTo(Command root)
     {
-        HelpOption help = root.Options.OfType<HelpOption>().Single();
+        HelpOption help = new("--help", "-h", "-?") { Description = "Show this help." };
         help.Action = new ExplainedHelp((HelpAction)help.Action!);
-        VersionOption version = root.Options.OfType<VersionOption>().Single();
-        version.Action = new ShowVersion();
+        root.Options.Add(help);
+        root.Options.Add(new VersionOption { Description = "Show the version.", Action = new ShowVersion() });
     }
 
     private static void WriteSection(TextWriter to, string title, IEnumerable<string> lines)
