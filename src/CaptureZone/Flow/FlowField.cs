@@ -25,6 +25,9 @@ public sealed class FlowField
     /// <summary>What it is solved for.</summary>
     public Parameters Parameters { get; }
 
+    /// <summary>The uniform regional discharge vector Qx + i Qy, m2/d; zero without regional flow.</summary>
+    public Complex UniformDischarge => Parameters.Regional.Discharge(Parameters.Aquifer);
+
     /// <summary>The aquifer at a place.</summary>
     /// <param name="at">The place, m.</param>
     public Aquifer AquiferAt(Complex at) => Parameters.Aquifer;
