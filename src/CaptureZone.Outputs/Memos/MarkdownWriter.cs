@@ -9,6 +9,9 @@ public static class MarkdownWriter
     /// <summary>Characters that Markdown could take for its own.</summary>
     private const string Special = "\\`*_[]<>|#~&$";
 
+    /// <summary>Characters of a line to be filled in by hand.</summary>
+    private const int LineToFillIn = 40;
+
     /// <summary>The memo's text.</summary>
     /// <param name="memo">The memo.</param>
     public static string Write(Memo memo) =>
@@ -47,14 +50,14 @@ public static class MarkdownWriter
         return text.AppendJoin('\n', table.Rows.Select(row => Row(row))).ToString();
     }
 
-    private static string Row(IEnumerable<string> cells) => "| " + string.Join(" | ", cells.Select(Escape)) + " |";
+    private static string Row(IEnumerable<string> cells) => "| " + string.Join(" | ", cells.Select(Inline)) + " |";
 
     private static string Text(Figure figure) => string.Create(
         CultureInfo.InvariantCulture,
         $"![{Escape(figure.AlternativeText)}]({figure.File})\n\n**Figure {figure.Number}.** {Escape(figure.Caption)}");
 
     private static string Text(FormLine line) =>
-        $"- {Escape(line.Label)}: {(line.Value.Length == 0 ? new string('_', 40) : Escape(line.Value))}";
+        $"- {Escape(line.Label)}: {(line.Value.Length == 0 ? new string('_', LineToFillIn) : Inline(line.Value))}";
 
     /// <summary>Fenced by more back-ticks than the text has in a row anywhere, so that nothing in it ends the fence.</summary>
     private static string Text(CodeText code)
@@ -69,16 +72,22 @@ public static class MarkdownWriter
         return $"{fence}toml\n{text}\n{fence}";
     }
 
-    /// <summary>The text as Markdown that shows it letter by letter.</summary>
-    /// <param name="text">Any text.</param>
-    internal static string Escape(string text)
+    /// <summary>The start of a block as Markdown that shows it letter by letter.</summary>
+    private static string Escape(string text)
     {
         string line = PlainText.OnOneLine(text).Trim();
-        int marker = MarkerIn(line);
-        StringBuilder escaped = new(line.Length + 8);
-        for (int i = 0; i < line.Length; i++)
+        return MarkerIn(line) is >= 0 and var marker
+            ? $"{line[..marker]}\\{line[marker]}{Inline(line[(marker + 1)..])}"
+            : Inline(line);
+    }
+
+    /// <summary>Text inside a line as Markdown that shows it letter by letter.</summary>
+    private static string Inline(string text)
+    {
+        StringBuilder escaped = new(text.Length);
+        foreach (char character in PlainText.OnOneLine(text))
         {
-            escaped.Append(i == marker || Special.Contains(line[i], StringComparison.Ordinal) ? "\\" : "").Append(line[i]);
+            escaped.Append(Special.Contains(character, StringComparison.Ordinal) ? "\\" : "").Append(character);
         }
 
         return escaped.ToString();

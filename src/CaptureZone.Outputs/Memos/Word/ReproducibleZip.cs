@@ -1,4 +1,3 @@
-using W = DocumentFormat.OpenXml.Wordprocessing;
 using System.IO.Compression;
 
 namespace CaptureZone.Outputs.Memos.Word;

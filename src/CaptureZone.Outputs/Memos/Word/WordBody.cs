@@ -1,6 +1,5 @@
 using W = DocumentFormat.OpenXml.Wordprocessing;
 using DocumentFormat.OpenXml;
-using DocumentFormat.OpenXml.Wordprocessing;
 
 namespace CaptureZone.Outputs.Memos.Word;
 

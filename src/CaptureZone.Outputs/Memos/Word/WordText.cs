@@ -54,5 +54,5 @@ internal static class WordText
     public static W.Paragraph Caption(string kind, int number, string text) =>
         Paragraph(WordStyles.Caption, Run(kind + " "), Field($" SEQ {kind} \\* ARABIC ", number), Run(". " + text));
 
-    private static Text Letters(string text) => new(text) { Space = SpaceProcessingModeValues.Preserve };
+    private static W.Text Letters(string text) => new(text) { Space = SpaceProcessingModeValues.Preserve };
 }

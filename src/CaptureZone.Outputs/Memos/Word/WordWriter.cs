@@ -1,4 +1,3 @@
-using W = DocumentFormat.OpenXml.Wordprocessing;
 using System.Text;
 using System.Xml;
 using System.Xml.Linq;
