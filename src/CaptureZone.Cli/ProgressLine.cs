@@ -6,7 +6,7 @@ namespace CaptureZone.Cli;
 /// Shows the step of work that takes longer than a second: on a terminal one line that is written over, elsewhere one line per
 /// step. What is quick shows nothing.
 /// </summary>
-internal sealed class ProgressLine : IProgress<Step>, IDisposable
+public sealed class ProgressLine : IProgress<Step>, IDisposable
 {
     /// <summary>Work shorter than this shows no progress.</summary>
     private static readonly TimeSpan _patience = TimeSpan.FromSeconds(1);

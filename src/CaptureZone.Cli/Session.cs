@@ -2,6 +2,8 @@ using System.CommandLine;
 using System.Reflection;
 using CaptureZone.Flow;
 using CaptureZone.Jobs;
+using CaptureZone.Jobs.Files;
+using CaptureZone.Jobs.Runs;
 using CaptureZone.Sites;
 
 namespace CaptureZone.Cli;

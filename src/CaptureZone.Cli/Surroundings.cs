@@ -1,5 +1,5 @@
 using System.Text;
-using CaptureZone.Jobs;
+using CaptureZone.Jobs.Runs;
 
 namespace CaptureZone.Cli;
 
@@ -31,7 +31,7 @@ public sealed record Surroundings : IDisposable
     public Interruption Interruption { get; init; } = new();
 
     /// <summary>Makes the main job.</summary>
-    public Func<RunJob> RunJob { get; init; } = static () => Jobs.RunJob.WithEngine();
+    public Func<RunJob> RunJob { get; init; } = static () => Jobs.Runs.RunJob.WithEngine();
 
     /// <summary>The surroundings of this process.</summary>
     public static Surroundings OfProcess()

@@ -1,5 +1,6 @@
 using System.Text;
 using CaptureZone.Jobs;
+using CaptureZone.Jobs.Files;
 
 namespace CaptureZone.Cli;
 

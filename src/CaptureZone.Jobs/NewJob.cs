@@ -1,4 +1,5 @@
 using System.Text;
+using CaptureZone.Jobs.Files;
 using CaptureZone.Sites.Reading;
 
 namespace CaptureZone.Jobs;

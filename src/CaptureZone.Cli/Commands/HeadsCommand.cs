@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 using System.CommandLine;
-using CaptureZone.Jobs;
+using CaptureZone.Jobs.Heads;
 using CaptureZone.Jobs.Summaries;
 using CaptureZone.Sites;
 

@@ -1,7 +1,8 @@
 using System.Collections.Immutable;
 using System.CommandLine;
 using System.CommandLine.Parsing;
-using CaptureZone.Jobs;
+using CaptureZone.Jobs.Files;
+using CaptureZone.Jobs.Paths;
 using CaptureZone.Jobs.Points;
 using CaptureZone.Jobs.Summaries;
 using CaptureZone.Sites;
@@ -68,11 +69,14 @@ internal static class PathsCommand
         SiteDocument site = SiteSource.Read(session, path);
         ImmutableArray<NamedPoint> points = _points.Read(session, path);
         RefuseTaken(line, replace);
+        string? lines = line.GetValue(_lines);
         PathsRequest request = new(
-            line.GetValue(_upstream) ? Sense.Upstream : Sense.Downstream, line.GetValue(_for) ?? double.PositiveInfinity);
+            line.GetValue(_upstream) ? Sense.Upstream : Sense.Downstream,
+            line.GetValue(_for) ?? double.PositiveInfinity,
+            Lines: lines is not null);
         ImmutableArray<PathRow> rows = session.WithProgress(
             line.GetValue(_threads), work => PathsJob.Follow(site, points, request, work));
-        if (line.GetValue(_lines) is { } lines)
+        if (lines is not null)
         {
             WholeFile.Write(lines, replace, stream => PathLines.Write(site, rows, stream));
         }

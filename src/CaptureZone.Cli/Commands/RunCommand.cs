@@ -1,5 +1,6 @@
 using System.CommandLine;
 using CaptureZone.Jobs;
+using CaptureZone.Jobs.Runs;
 using CaptureZone.Jobs.Summaries;
 using CaptureZone.Outputs;
 using CaptureZone.Sites;

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using CaptureZone.Jobs.Runs;
 using CaptureZone.Outputs;
 using CaptureZone.Outputs.Text;
 using CaptureZone.Sites.Coordinates;

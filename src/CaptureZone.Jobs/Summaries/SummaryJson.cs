@@ -3,8 +3,12 @@ using System.Text;
 using System.Text.Encodings.Web;
 using System.Text.Json;
 using CaptureZone.Elements.Wells;
+using CaptureZone.Jobs.Heads;
+using CaptureZone.Jobs.Paths;
 using CaptureZone.Jobs.Points;
+using CaptureZone.Jobs.Runs;
 using CaptureZone.Outputs;
+using CaptureZone.Outputs.Results;
 using CaptureZone.Outputs.Text;
 using CaptureZone.Sites;
 using CaptureZone.Tracing;
@@ -34,11 +38,11 @@ public static class SummaryJson
         WriteSite(json, report.Site);
         json.WriteString("folder", request.Folder);
         json.WriteBoolean("checks_passed", answers.Checks.All(check => check.Passed));
-        WriteArray(json, "failed_checks", answers.Checks.Where(check => !check.Passed), check => WriteCheck(json, check));
+        json.WriteObjects("failed_checks", [.. answers.Checks.Where(check => !check.Passed)], (Check check) => WriteCheck(json, check));
         json.WriteBoolean("stagnation_complete", answers.StagnationComplete);
-        WriteArray(json, "warnings", answers.Findings, finding => WriteFinding(json, FindingText.Of(finding, report)));
-        WriteArray(json, "plumes", answers.Plumes, plume => WritePlume(json, report, plume));
-        WriteArray(json, "wells", answers.Wells, well => WriteWell(json, report, well));
+        json.WriteObjects("warnings", answers.Findings, finding => WriteFinding(json, FindingText.Of(finding, report)));
+        json.WriteObjects("plumes", answers.Plumes, plume => WritePlume(json, report, plume));
+        json.WriteObjects("wells", answers.Wells, well => WriteWell(json, report, well));
         json.WriteString("caution", Caution.Text);
     });
 
@@ -49,11 +53,11 @@ public static class SummaryJson
     public static void WriteCheck(SiteDocument? site, ImmutableArray<Complaint> complaints, TextWriter to) => Write(to, json =>
     {
         json.WriteBoolean("runs", site is not null);
-        WriteArray(json, "complaints", complaints, complaint => WriteComplaint(json, complaint));
+        json.WriteObjects("complaints", complaints, complaint => WriteComplaint(json, complaint));
         if (site is not null)
         {
             WriteSite(json, site);
-            WriteArray(json, "inputs", site.Inputs, input => WriteInput(json, input));
+            json.WriteObjects("inputs", site.Inputs, input => WriteInput(json, input));
         }
     });
 
@@ -61,15 +65,15 @@ public static class SummaryJson
     /// <param name="rows">Its rows.</param>
     /// <param name="to">Where to.</param>
     public static void WriteHeads(ImmutableArray<HeadRow> rows, TextWriter to) => Write(to, json =>
-        WriteArray(json, "heads", rows, row =>
+        json.WriteObjects("heads", rows, row =>
         {
             WritePoint(json, row.Point);
-            WriteNumber(json, "head_m", row.Head);
-            WriteNumber(json, "thickness_m", row.Thickness);
-            WriteNumber(json, "qx_m2d", row.Discharge.Real);
-            WriteNumber(json, "qy_m2d", row.Discharge.Imaginary);
-            WriteNumber(json, "vx_md", row.Velocity.Real);
-            WriteNumber(json, "vy_md", row.Velocity.Imaginary);
+            json.WriteValue("head_m", row.Head);
+            json.WriteValue("thickness_m", row.Thickness);
+            json.WriteValue("qx_m2d", row.Discharge.Real);
+            json.WriteValue("qy_m2d", row.Discharge.Imaginary);
+            json.WriteValue("vx_md", row.Velocity.Real);
+            json.WriteValue("vy_md", row.Velocity.Imaginary);
             json.WriteString("note", row.Note);
         }));
 
@@ -78,14 +82,14 @@ public static class SummaryJson
     /// <param name="rows">Its rows.</param>
     /// <param name="to">Where to.</param>
     public static void WritePaths(SiteDocument site, ImmutableArray<PathRow> rows, TextWriter to) => Write(to, json =>
-        WriteArray(json, "paths", rows, row =>
+        json.WriteObjects("paths", rows, row =>
         {
             WritePoint(json, row.Start);
             PathEnd end = row.End;
-            WriteNumber(json, "end_x", site.Frame.SiteX(end.At));
-            WriteNumber(json, "end_y", site.Frame.SiteY(end.At));
-            WriteNumber(json, "time_d", end.Time);
-            WriteNumber(json, "length_m", end.Length);
+            json.WriteValue("end_x", site.Frame.SiteX(end.At));
+            json.WriteValue("end_y", site.Frame.SiteY(end.At));
+            json.WriteValue("time_d", end.Time);
+            json.WriteValue("length_m", end.Length);
             json.WriteString("fate", FateText.Token(end.Fate, site.Model));
         }));
 
@@ -102,19 +106,6 @@ public static class SummaryJson
         to.WriteLine(Encoding.UTF8.GetString(bytes.ToArray()));
     }
 
-    private static void WriteArray<T>(Utf8JsonWriter json, string name, IEnumerable<T> items, Action<T> writeMembers)
-    {
-        json.WriteStartArray(name);
-        foreach (T item in items)
-        {
-            json.WriteStartObject();
-            writeMembers(item);
-            json.WriteEndObject();
-        }
-
-        json.WriteEndArray();
-    }
-
     private static void WriteSite(Utf8JsonWriter json, SiteDocument site)
     {
         json.WriteStartObject("site");
@@ -127,8 +118,8 @@ public static class SummaryJson
     private static void WriteCheck(Utf8JsonWriter json, Check check)
     {
         json.WriteString("name", check.Name);
-        WriteNumber(json, "value", check.Value);
-        WriteNumber(json, "limit", check.Limit);
+        json.WriteValue("value", check.Value);
+        json.WriteValue("limit", check.Limit);
     }
 
     private static void WriteFinding(Utf8JsonWriter json, FindingSentence finding)
@@ -141,24 +132,24 @@ public static class SummaryJson
     {
         json.WriteString("name", report.Answers.Questions.Plumes[plume.Plume].Name);
         json.WriteBoolean("captured", plume.Captured);
-        WriteNumber(json, "captured_fraction", plume.CapturedFraction);
-        WriteNumber(json, "margin", plume.Margin);
+        json.WriteValue("captured_fraction", plume.CapturedFraction);
+        json.WriteValue("margin", plume.Margin);
     }
 
     private static void WriteWell(Utf8JsonWriter json, Report report, WellAnswer answer)
     {
         Well well = report.Site.Model.Wells[answer.Well];
         json.WriteString("name", well.Name);
-        WriteNumber(json, "rate", well.Rate);
+        json.WriteValue("rate", well.Rate);
         json.WriteString("purpose", WellText.Token(well.Purpose));
-        WriteNumber(json, "head_at_screen", answer.HeadAtScreen);
-        WriteNumber(json, "drawdown_at_screen", answer.DrawdownAtScreen);
-        WriteNumber(json, "largest_rate", answer.LargestRate);
+        json.WriteValue("head_at_screen", answer.HeadAtScreen);
+        json.WriteValue("drawdown_at_screen", answer.DrawdownAtScreen);
+        json.WriteValue("largest_rate", answer.LargestRate);
         if (answer.Zone is { } zone)
         {
-            WriteNumber(json, "area", zone.Area);
+            json.WriteValue("area", zone.Area);
             json.WriteBoolean("open", zone.Open);
-            WriteNumber(json, "width_upgradient", zone.WidthUpgradient);
+            json.WriteValue("width_upgradient", zone.WidthUpgradient);
         }
     }
 
@@ -175,26 +166,14 @@ public static class SummaryJson
     {
         json.WriteString("key", input.Key);
         json.WriteString("written", input.Written);
-        WriteNumber(json, "value", input.Value);
+        json.WriteValue("value", input.Value);
         json.WriteString("source", input.Source);
     }
 
     private static void WritePoint(Utf8JsonWriter json, NamedPoint point)
     {
         json.WriteString("name", point.Name);
-        WriteNumber(json, "x", point.X);
-        WriteNumber(json, "y", point.Y);
-    }
-
-    private static void WriteNumber(Utf8JsonWriter json, string name, double? value)
-    {
-        if (value is { } number && Rounding.TenFigures(number) is { } rounded)
-        {
-            json.WriteNumber(name, rounded);
-        }
-        else
-        {
-            json.WriteNull(name);
-        }
+        json.WriteValue("x", point.X);
+        json.WriteValue("y", point.Y);
     }
 }

@@ -3,7 +3,7 @@ using System.Numerics;
 using CaptureZone.Jobs.Points;
 using CaptureZone.Jobs.Tables;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Heads;
 
 /// <summary>The table of heads: metres and days; x and y in the site's coordinates.</summary>
 public static class HeadsCsv

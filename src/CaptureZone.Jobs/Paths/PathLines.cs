@@ -3,12 +3,12 @@ using System.Globalization;
 using System.Numerics;
 using System.Text.Encodings.Web;
 using System.Text.Json;
-using CaptureZone.Outputs;
+using CaptureZone.Outputs.Results;
 using CaptureZone.Outputs.Text;
 using CaptureZone.Sites;
 using CaptureZone.Topology;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Paths;
 
 /// <summary>
 /// Paths as GeoJSON lines (RFC 7946) with the time at each vertex; with local coordinates these stand in place of longitude and
@@ -52,12 +52,12 @@ public static class PathLines
         json.WriteStartObject("properties");
         json.WriteString("name", row.Start.Name);
         json.WriteString("fate", FateText.Token(row.End.Fate, site.Model));
-        WriteNumber(json, "time_d", row.End.Time);
-        WriteNumber(json, "length_m", row.End.Length);
+        json.WriteValue("time_d", row.End.Time);
+        json.WriteValue("length_m", row.End.Length);
         json.WriteStartArray("times_d");
         foreach (PathPoint point in row.Points)
         {
-            WriteValue(json, point.Time);
+            json.WriteValue(point.Time);
         }
 
         json.WriteEndArray();
@@ -93,8 +93,8 @@ public static class PathLines
         json.WriteStartArray();
         if (site.Coordinates.IsLocal)
         {
-            WriteValue(json, x);
-            WriteValue(json, y);
+            json.WriteValue(x);
+            json.WriteValue(y);
         }
         else
         {
@@ -104,23 +104,5 @@ public static class PathLines
         }
 
         json.WriteEndArray();
-    }
-
-    private static void WriteNumber(Utf8JsonWriter json, string name, double value)
-    {
-        json.WritePropertyName(name);
-        WriteValue(json, value);
-    }
-
-    private static void WriteValue(Utf8JsonWriter json, double value)
-    {
-        if (Rounding.TenFigures(value) is { } rounded)
-        {
-            json.WriteNumberValue(rounded);
-        }
-        else
-        {
-            json.WriteNullValue();
-        }
     }
 }

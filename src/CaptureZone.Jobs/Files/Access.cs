@@ -1,6 +1,6 @@
 using System.Security;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Files;
 
 /// <summary>Turns what the system says about files into what a person can act on.</summary>
 public static class Access

@@ -1,9 +1,9 @@
 using CaptureZone.Flow;
-using CaptureZone.Jobs.Results;
+using CaptureZone.Jobs.Files;
 using CaptureZone.Outputs;
 using CaptureZone.Sites;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Runs;
 
 /// <summary>Answers a model's questions.</summary>
 /// <param name="model">The model.</param>

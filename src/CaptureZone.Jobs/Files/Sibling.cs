@@ -1,4 +1,4 @@
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Files;
 
 /// <summary>
 /// Names for what is under way beside the place it is meant for: <c>NAME.new-1a2b3c4d</c> while it is written,

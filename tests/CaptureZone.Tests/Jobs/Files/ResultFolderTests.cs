@@ -1,7 +1,7 @@
 using CaptureZone.Jobs;
-using CaptureZone.Jobs.Results;
+using CaptureZone.Jobs.Files;
 
-namespace CaptureZone.Tests.Jobs.Results;
+namespace CaptureZone.Tests.Jobs.Files;
 
 public sealed class ResultFolderTests : IDisposable
 {

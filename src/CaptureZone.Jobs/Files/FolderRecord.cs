@@ -2,7 +2,7 @@ using System.Collections.Immutable;
 using System.Security.Cryptography;
 using System.Text.Json;
 
-namespace CaptureZone.Jobs.Results;
+namespace CaptureZone.Jobs.Files;
 
 /// <summary>
 /// The record that a result folder keeps of itself: the SHA-256 of every file as it was written. It tells a folder that this

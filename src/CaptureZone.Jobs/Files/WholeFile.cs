@@ -1,4 +1,4 @@
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Files;
 
 /// <summary>Files that appear whole or not at all.</summary>
 public static class WholeFile

@@ -1,7 +1,8 @@
 using System.Text;
 using CaptureZone.Jobs;
+using CaptureZone.Jobs.Files;
 
-namespace CaptureZone.Tests.Jobs;
+namespace CaptureZone.Tests.Jobs.Files;
 
 public sealed class WholeFileTests : IDisposable
 {

@@ -6,7 +6,7 @@ using CaptureZone.Flow;
 using CaptureZone.Jobs.Points;
 using CaptureZone.Sites;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Heads;
 
 /// <summary>Head and flow at one point; NaN where there is none.</summary>
 /// <param name="Point">The point.</param>

@@ -1,7 +1,9 @@
 using CaptureZone.Outputs;
+using CaptureZone.Outputs.Memos;
+using CaptureZone.Outputs.Results;
 using CaptureZone.Outputs.Standing;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Runs;
 
 /// <summary>The files of a run, each written from the report alone.</summary>
 public static class RunFiles

@@ -5,22 +5,30 @@ using CaptureZone.Sites;
 using CaptureZone.Topology;
 using CaptureZone.Tracing;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Paths;
 
 /// <summary>How paths are followed.</summary>
 /// <param name="Sense">With the water or against it.</param>
 /// <param name="Longest">Largest travel time of water, d; infinite for no limit.</param>
-public sealed record PathsRequest(Sense Sense, double Longest);
+/// <param name="Lines">Whether the vertices are wanted too.</param>
+public sealed record PathsRequest(Sense Sense, double Longest, bool Lines);
 
 /// <summary>The path of a water particle from a point.</summary>
 /// <param name="Start">The point.</param>
 /// <param name="End">How it ends; the place in local metres.</param>
-/// <param name="Points">Its vertices with the time at each, in the order in which it was followed; local metres.</param>
+/// <param name="Points">Its vertices with the time at each, in the order in which it was followed; local metres; empty
+/// when they were not wanted.</param>
 public sealed record PathRow(NamedPoint Start, PathEnd End, ImmutableArray<PathPoint> Points);
 
 /// <summary>Paths of water from points.</summary>
 public static class PathsJob
 {
+    /// <summary>Largest change of direction from vertex to vertex, radians: smooth to the eye on a map (3 degrees).</summary>
+    private const double Turn = 3 * Math.PI / 180;
+
+    /// <summary>Largest flow that a chord cuts off from its arc, of the largest rate: below what the capture zones allow.</summary>
+    private const double LeakShare = 1e-4;
+
     /// <summary>Follows the path from each point.</summary>
     /// <param name="site">The site.</param>
     /// <param name="points">The points.</param>
@@ -45,14 +53,22 @@ public static class PathsJob
 
     private static PathRow Follow(Tracer tracer, SiteDocument site, NamedPoint point, PathsRequest request)
     {
-        Vertices vertices = new();
+        Vertices? vertices = request.Lines ? new Vertices(ResolutionFor(site.Model)) : null;
         PathEnd end = tracer.Trace(site.Frame.ToLocal(point.X, point.Y), request.Sense, request.Longest, vertices);
-        return new PathRow(point, end, [.. vertices.Points]);
+        return new PathRow(point, end, vertices is null ? [] : [.. vertices.Points]);
     }
 
-    private sealed class Vertices : IPathSink
+    private static PathResolution ResolutionFor(Model model)
+    {
+        double largest = model.Wells.Select(well => Math.Abs(well.Rate)).DefaultIfEmpty().Max();
+        return new PathResolution(Turn, largest > 0 ? LeakShare * largest : double.PositiveInfinity);
+    }
+
+    private sealed class Vertices(PathResolution resolution) : IPathSink
     {
         public List<PathPoint> Points { get; } = [];
+
+        public PathResolution Resolution { get; } = resolution;
 
         public void Add(Complex at, double time) => Points.Add(new PathPoint(at, time));
     }

@@ -1,6 +1,6 @@
 using CaptureZone.Jobs.Tables;
 
-namespace CaptureZone.Tests.Jobs;
+namespace CaptureZone.Tests.Jobs.Tables;
 
 public sealed class CsvTextTests
 {

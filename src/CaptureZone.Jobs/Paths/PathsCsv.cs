@@ -6,7 +6,7 @@ using CaptureZone.Sites;
 using CaptureZone.Topology;
 using CaptureZone.Tracing;
 
-namespace CaptureZone.Jobs;
+namespace CaptureZone.Jobs.Paths;
 
 /// <summary>The table of paths' ends: metres and days; places in the site's coordinates.</summary>
 public static class PathsCsv

@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 
-namespace CaptureZone.Jobs.Results;
+namespace CaptureZone.Jobs.Files;
 
 /// <summary>
 /// A result folder that appears whole or not at all. Files go into a sibling folder, which takes the final name when it is
