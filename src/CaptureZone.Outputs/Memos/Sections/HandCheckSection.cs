@@ -63,7 +63,7 @@ internal static class HandCheckSection
         [
             .. facts.Zones.Where(zone => zone.Well.Purpose == WellPurpose.Containment).Select(zone => zone.Zone.WidthUpgradient),
         ];
-        if (widths.Length > 1 && widths.All(width => width is not null))
+        if (facts.DischargePerWidth > 0 && widths.Length > 1 && widths.All(width => width is not null))
         {
             double hand = HandCheck.WidthUpgradient(facts.Containment.Sum(well => well.Rate), facts.DischargePerWidth);
             yield return

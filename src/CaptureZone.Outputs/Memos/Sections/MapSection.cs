@@ -5,7 +5,7 @@ internal static class MapSection
 {
     public static IEnumerable<Block> Of(Facts facts, string mapFile)
     {
-        yield return new Heading(1, "Map");
+        yield return new Heading(1, "Map") { StartsPage = true };
         yield return new Figure(
             $"Plan of the site with predicted heads, zones and plumes. Predicted by calculation, not measured. Coordinates: "
             + $"{facts.Site.Coordinates.Stated} ({facts.Site.Coordinates.Name}); grid north is up.",

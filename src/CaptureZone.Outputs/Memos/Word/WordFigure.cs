@@ -1,9 +1,9 @@
-using W = DocumentFormat.OpenXml.Wordprocessing;
 using System.Buffers.Binary;
 using DocumentFormat.OpenXml;
 using DocumentFormat.OpenXml.Wordprocessing;
 using A = DocumentFormat.OpenXml.Drawing;
 using Pic = DocumentFormat.OpenXml.Drawing.Pictures;
+using W = DocumentFormat.OpenXml.Wordprocessing;
 using Wp = DocumentFormat.OpenXml.Drawing.Wordprocessing;
 
 namespace CaptureZone.Outputs.Memos.Word;

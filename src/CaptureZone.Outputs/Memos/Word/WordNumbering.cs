@@ -1,5 +1,5 @@
-using W = DocumentFormat.OpenXml.Wordprocessing;
 using DocumentFormat.OpenXml.Wordprocessing;
+using W = DocumentFormat.OpenXml.Wordprocessing;
 
 namespace CaptureZone.Outputs.Memos.Word;
 

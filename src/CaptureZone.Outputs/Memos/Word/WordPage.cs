@@ -1,6 +1,6 @@
-using W = DocumentFormat.OpenXml.Wordprocessing;
 using DocumentFormat.OpenXml;
 using DocumentFormat.OpenXml.Wordprocessing;
+using W = DocumentFormat.OpenXml.Wordprocessing;
 
 namespace CaptureZone.Outputs.Memos.Word;
 

@@ -1,3 +1,4 @@
+using System.Globalization;
 using DocumentFormat.OpenXml;
 using DocumentFormat.OpenXml.Wordprocessing;
 
@@ -16,6 +17,8 @@ internal static class WordStyles
     public const string Cell = "TableText";
     public const string HeaderCell = "TableHeader";
     public const string Label = "FormLabel";
+    public const string Value = "FormValue";
+    public const string Gap = "Gap";
     public const string Code = "Code";
     public const string Picture = "Picture";
     public const string Header = "Header";
@@ -54,6 +57,8 @@ internal static class WordStyles
         Paragraph(Cell, "Table Text", 17, Space(20, 20)),
         Paragraph(HeaderCell, "Table Header", 17, [new KeepNext(), .. Space(30, 30)], isBold: true),
         Paragraph(Label, "Form Label", 20, Space(20, 20), isBold: true),
+        Paragraph(Value, "Form Value", 20, Space(20, 20)),
+        Paragraph(Gap, "Gap", 8, Space(0, 60)),
         Paragraph(Code, "Code", 15, Space(0, 0), font: Mono),
         Paragraph(Picture, "Picture", 20, [new KeepNext(), .. Space(120, 60), new Justification { Val = JustificationValues.Center }]),
         Paragraph(Header, "header", 15, Space(0, 0)),
@@ -95,7 +100,7 @@ internal static class WordStyles
         return style;
     }
 
-    private static bool IsOwn(string id) => id is Verdict or Warning or Caution or Cell or HeaderCell or Label or Code or Picture;
+    private static bool IsOwn(string id) => id is Verdict or Warning or Caution or Cell or HeaderCell or Label or Value or Gap or Code or Picture;
 
     private static StyleRunProperties Look(int halfPoints, bool isBold, bool isItalic, string font, string? colour)
     {
@@ -115,7 +120,7 @@ internal static class WordStyles
             look.Append(new Color { Val = colour });
         }
 
-        string size = halfPoints.ToString(System.Globalization.CultureInfo.InvariantCulture);
+        string size = halfPoints.ToString(CultureInfo.InvariantCulture);
         look.Append(new FontSize { Val = size }, new FontSizeComplexScript { Val = size });
         return look;
     }
@@ -123,14 +128,7 @@ internal static class WordStyles
     private static RunFonts Fonts(string name) => new() { Ascii = name, HighAnsi = name, EastAsia = name, ComplexScript = name };
 
     /// <summary>Space before and after, twentieths of a point.</summary>
-    private static OpenXmlElement[] Space(int before, int after) =>
-    [
-        new SpacingBetweenLines
-        {
-            Before = before.ToString(System.Globalization.CultureInfo.InvariantCulture),
-            After = after.ToString(System.Globalization.CultureInfo.InvariantCulture),
-        },
-    ];
+    private static OpenXmlElement[] Space(int before, int after) => [WordText.Space(before, after)];
 
     private static OpenXmlElement[] Bulleted() =>
     [

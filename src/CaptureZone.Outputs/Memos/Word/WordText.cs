@@ -1,7 +1,7 @@
-using W = DocumentFormat.OpenXml.Wordprocessing;
 using System.Globalization;
 using DocumentFormat.OpenXml;
 using DocumentFormat.OpenXml.Wordprocessing;
+using W = DocumentFormat.OpenXml.Wordprocessing;
 
 namespace CaptureZone.Outputs.Memos.Word;
 
@@ -53,6 +53,15 @@ internal static class WordText
     /// <param name="text">Its text.</param>
     public static W.Paragraph Caption(string kind, int number, string text) =>
         Paragraph(WordStyles.Caption, Run(kind + " "), Field($" SEQ {kind} \\* ARABIC ", number), Run(". " + text));
+
+    /// <summary>Space before and after a paragraph, twentieths of a point.</summary>
+    /// <param name="before">Before it.</param>
+    /// <param name="after">After it.</param>
+    public static SpacingBetweenLines Space(int before, int after) => new()
+    {
+        Before = before.ToString(CultureInfo.InvariantCulture),
+        After = after.ToString(CultureInfo.InvariantCulture),
+    };
 
     private static W.Text Letters(string text) => new(text) { Space = SpaceProcessingModeValues.Preserve };
 }

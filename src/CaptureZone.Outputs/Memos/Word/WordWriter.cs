@@ -11,6 +11,7 @@ namespace CaptureZone.Outputs.Memos.Word;
 public static class WordWriter
 {
     private const string DocumentId = "rId1";
+    private const string PropertiesId = "rId2";
     private const string StylesId = "rIdStyles";
     private const string NumberingId = "rIdNumbering";
     private const string SettingsId = "rIdSettings";
@@ -31,7 +32,9 @@ public static class WordWriter
             WordPage page = WordPage.Of(memo.Paper);
             AddParts(main, memo, mapPng, page);
             main.Document = new(Body(memo, mapPng, page));
-            AddProperties(document.AddCoreFilePropertiesPart(), memo);
+            CoreFilePropertiesPart properties = document.AddCoreFilePropertiesPart();
+            document.ChangeIdOfPart(properties, PropertiesId);
+            AddProperties(properties, memo);
         }
 
         return ReproducibleZip.Of(package);
@@ -43,7 +46,7 @@ public static class WordWriter
         return new(
         [
             WordText.Paragraph(WordStyles.Title, WordText.Run(memo.Title)),
-            .. memo.Blocks.SelectMany(body.Of),
+            .. body.Of(memo.Blocks),
             page.Section(HeaderId, FooterId),
         ]);
     }
