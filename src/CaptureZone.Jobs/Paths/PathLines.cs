@@ -33,6 +33,7 @@ public static class PathLines
         if (site.Coordinates.IsLocal)
         {
             json.WriteString("coordinates", "local");
+            json.WriteString("unit", site.Coordinates.Unit);
         }
 
         json.WriteStartArray("features");

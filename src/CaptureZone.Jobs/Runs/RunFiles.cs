@@ -1,7 +1,8 @@
 using CaptureZone.Outputs;
+using CaptureZone.Outputs.Gis;
+using CaptureZone.Outputs.Maps;
 using CaptureZone.Outputs.Memos;
 using CaptureZone.Outputs.Results;
-using CaptureZone.Outputs.Standing;
 
 namespace CaptureZone.Jobs.Runs;
 
