@@ -4,5 +4,9 @@ namespace CaptureZone.Cli;
 public static class Program
 {
     /// <summary>Runs one command and gives its exit code.</summary>
-    public static int Main(string[] args) => args.Length;
+    public static int Main(string[] args)
+    {
+        using Surroundings surroundings = Surroundings.OfProcess();
+        return CommandLine.Run(args, surroundings);
+    }
 }

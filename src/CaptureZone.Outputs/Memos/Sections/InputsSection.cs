@@ -1,0 +1,41 @@
+using System.Collections.Immutable;
+using CaptureZone.Sites;
+
+namespace CaptureZone.Outputs.Memos.Sections;
+
+/// <summary>Table 1: every input with its unit, its usual range and its source.</summary>
+internal static class InputsSection
+{
+    public static IEnumerable<Block> Of(Facts facts)
+    {
+        yield return new Heading(1, "Inputs");
+        yield return new Table(
+            "Inputs of the calculation.",
+            [
+                new("Input", 25), new("Value", 12, IsNumeric: true), new("Unit", 10), new("As written", 15), new("Usual range", 20),
+                new("Source", 22),
+            ],
+            [.. facts.Site.Inputs.Select(input => Row(input, facts))]);
+        yield return new Paragraph(
+            "Rates are positive for extraction and negative for injection. One year is 365.25 days. The site file in the appendix holds "
+            + "all inputs, outlines of plumes included.");
+    }
+
+    private static ImmutableArray<string> Row(InputEntry input, Facts facts)
+    {
+        (string value, string unit) = Value(input, facts);
+        return [input.Label, value, unit, input.Written, input.UsualRange, input.Source.Length == 0 ? "source not given" : input.Source];
+    }
+
+    private static (string Value, string Unit) Value(InputEntry input, Facts facts)
+    {
+        if (input.Quantity == QuantityKind.Place)
+        {
+            return ("", "");
+        }
+
+        string unit = facts.Print.Unit(input.Quantity);
+        string entered = facts.Print.Entered(input.Quantity, input.Value);
+        return (entered[..^unit.Length].TrimEnd(), unit);
+    }
+}
