@@ -26,8 +26,8 @@ internal static class HandCheckSection
         yield return new Table(
             "Formulas for one well alone, beside the computed values.",
             [
-                new("Well", 22), new("Quantity", 30), new("Formula", 22), facts.NumberColumn("By hand", QuantityKind.Length, 13),
-                facts.NumberColumn("Computed", QuantityKind.Length, 13),
+                new("Well", 22), new("Quantity", 30), new("Formula", 20), facts.NumberColumn("By hand", QuantityKind.Length, 14),
+                facts.NumberColumn("Computed", QuantityKind.Length, 16),
             ],
             rows);
         yield return new Paragraph(Remark(facts));

@@ -30,6 +30,9 @@ internal static class WordStyles
     /// <summary>Pale ground of header rows and of the verdict.</summary>
     public const string Ground = "E9EEF3";
 
+    /// <summary>Pale blue of the rules between a table's rows.</summary>
+    public const string Pale = "B9C6D2";
+
     /// <summary>Dark orange at the side of a warning; told from the verdict by its text and its place as well.</summary>
     private const string Alert = "A4480F";
 

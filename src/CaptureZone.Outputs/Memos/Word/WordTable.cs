@@ -25,7 +25,7 @@ internal static class WordTable
     {
         int[] widths = Widths([.. table.Columns.Select(column => column.Width)], page.TextWidth);
         W.Table grid = Grid(widths, new TableBorders(
-            Rule<TopBorder>(8), Rule<BottomBorder>(8), Rule<InsideHorizontalBorder>(2)));
+            Rule<TopBorder>(8), Rule<BottomBorder>(8), Rule<InsideHorizontalBorder>(4, WordStyles.Pale)));
         grid.Append(HeaderRow(table, widths));
         for (int i = 0; i < table.Rows.Length; i++)
         {
@@ -129,8 +129,8 @@ internal static class WordTable
         return paragraph;
     }
 
-    private static TBorder Rule<TBorder>(uint eighths)
-        where TBorder : BorderType, new() => new() { Val = BorderValues.Single, Size = eighths, Space = 0, Color = WordStyles.Ink };
+    private static TBorder Rule<TBorder>(uint eighths, string colour = WordStyles.Ink)
+        where TBorder : BorderType, new() => new() { Val = BorderValues.Single, Size = eighths, Space = 0, Color = colour };
 
     private static int[] Widths(double[] shares, int total) => [.. shares.Select(share => (int)(share / shares.Sum() * total))];
 
