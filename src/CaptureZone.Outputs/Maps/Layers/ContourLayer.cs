@@ -1,0 +1,91 @@
+using System.Globalization;
+using CaptureZone.Sites;
+using SkiaSharp;
+
+namespace CaptureZone.Outputs.Maps;
+
+/// <summary>Lines of equal predicted head with their values.</summary>
+/// <param name="scene">What is drawn.</param>
+internal sealed class ContourLayer(MapScene scene) : IMapLayer
+{
+    /// <summary>Each fifth line is heavier (common practice, no source).</summary>
+    private const int IndexEvery = 5;
+
+    /// <summary>One value on each such length of line, units of the sheet.</summary>
+    private const float LabelEvery = 1300;
+
+    private const int MostDecimals = 4;
+
+    /// <summary>A line is at a round multiple of the interval when it is nearer than this share of it.</summary>
+    private const double Nearly = 1e-6;
+
+    private static readonly TextStyle ValueStyle = new(Look.SmallSize, Look.Head, Halo: true);
+
+    private readonly double _interval = scene.Print.In(QuantityKind.Length, scene.Answers.ContourInterval);
+
+    /// <inheritdoc/>
+    public string Name => "head-contours";
+
+    /// <inheritdoc/>
+    public IEnumerable<LegendItem> Legend
+    {
+        get
+        {
+            string unit = scene.Print.Unit(QuantityKind.Length);
+            return scene.Answers.Contours.Length == 0
+                ? []
+                : [LegendItem.Line($"Predicted head, elevation in {unit}; interval {Text(_interval)} {unit}", Look.HeadPen)];
+        }
+    }
+
+    /// <inheritdoc/>
+    public IEnumerable<LabelRequest> Labels
+    {
+        get
+        {
+            foreach (HeadContour contour in scene.Answers.Contours)
+            {
+                LabelBlock block = LabelBlock.Of(Text(scene.Print.In(QuantityKind.Length, contour.Head)), ValueStyle);
+                foreach (IReadOnlyList<SKPoint> part in Shapes(contour).Traces.SelectMany(trace => Stretches(trace.Points)))
+                {
+                    SKPoint middle = LabelSpots.PointAt(part, LabelSpots.Length(part) / 2);
+                    yield return new LabelRequest(
+                        block, LabelSpots.Along(part, block, at => SKPoint.Distance(at, middle)), Optional: true);
+                }
+            }
+        }
+    }
+
+    /// <inheritdoc/>
+    public void Draw(IMapCanvas canvas)
+    {
+        foreach (HeadContour contour in scene.Answers.Contours)
+        {
+            double order = scene.Print.In(QuantityKind.Length, contour.Head) / (IndexEvery * _interval);
+            bool index = Math.Abs(order - Math.Round(order)) < Nearly * Math.Max(1, Math.Abs(order));
+            canvas.Stroke(Shapes(contour), index ? Look.IndexHeadPen : Look.HeadPen);
+        }
+    }
+
+    private static IEnumerable<IReadOnlyList<SKPoint>> Stretches(IReadOnlyList<SKPoint> line)
+    {
+        float length = LabelSpots.Length(line);
+        int count = Math.Max(1, (int)MathF.Round(length / LabelEvery));
+        return Enumerable.Range(0, count).Select(i => LabelSpots.Part(line, i * length / count, (i + 1) * length / count));
+    }
+
+    private Shape Shapes(HeadContour contour) => new([.. contour.Lines.SelectMany(line => scene.View.Line(line).Traces)]);
+
+    /// <summary>As many decimals as the interval has.</summary>
+    private string Text(double value)
+    {
+        int decimals = Enumerable.Range(0, MostDecimals).FirstOrDefault(IsEnough, MostDecimals);
+        return value.ToString(string.Create(CultureInfo.InvariantCulture, $"F{decimals}"), CultureInfo.InvariantCulture);
+    }
+
+    private bool IsEnough(int decimals)
+    {
+        double scaled = _interval * Math.Pow(10, decimals);
+        return Math.Abs(scaled - Math.Round(scaled)) < Nearly * scaled;
+    }
+}
