@@ -44,13 +44,7 @@ internal static class WellsSection
         answer.LargestRate is { } rate ? facts.Print.Number(QuantityKind.Rate, rate) : Printer.NotANumber,
     ];
 
-    private static string Purpose(Well well) => well switch
-    {
-        { Rate: < 0 } => "injection",
-        { Purpose: WellPurpose.Containment } => "containment",
-        { Purpose: WellPurpose.Supply } => "supply",
-        _ => "other",
-    };
+    private static string Purpose(Well well) => well.Rate < 0 ? "injection" : WellText.Token(well.Purpose);
 
     private static IEnumerable<Block> Zones(Facts facts)
     {

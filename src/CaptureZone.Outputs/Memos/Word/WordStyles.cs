@@ -25,7 +25,7 @@ internal static class WordStyles
     public const string Footer = "Footer";
 
     /// <summary>Dark blue of headings and rules; black enough in grey print.</summary>
-    public const string Ink = "1F3A57";
+    public const string Ink = "123F6B";
 
     /// <summary>Pale ground of header rows and of the verdict.</summary>
     public const string Ground = "E9EEF3";
@@ -59,8 +59,8 @@ internal static class WordStyles
         Paragraph(Caution, "Caution", 18, Space(60, 160), isItalic: true),
         Paragraph(Cell, "Table Text", 17, Space(20, 20)),
         Paragraph(HeaderCell, "Table Header", 17, [new KeepNext(), .. Space(30, 30)], isBold: true),
-        Paragraph(Label, "Form Label", 20, Space(20, 20), isBold: true),
-        Paragraph(Value, "Form Value", 20, Space(20, 20)),
+        Paragraph(Label, "Form Label", 19, Space(20, 20), isBold: true),
+        Paragraph(Value, "Form Value", 19, Space(20, 20)),
         Paragraph(Gap, "Gap", 8, Space(0, 60)),
         Paragraph(Code, "Code", 15, Space(0, 0), font: Mono),
         Paragraph(Picture, "Picture", 20, [new KeepNext(), .. Space(120, 60), new Justification { Val = JustificationValues.Center }]),

@@ -15,8 +15,8 @@ internal static class WordTable
     /// <summary>Left and right in every cell, twentieths of a point: 1.8 mm.</summary>
     private const short CellMargin = 100;
 
-    /// <summary>A form's labels take this share of the width.</summary>
-    private const double LabelShare = 0.3;
+    /// <summary>A form's labels take this share of the width; the rest holds a SHA-256 on one line.</summary>
+    private const double LabelShare = 0.27;
 
     /// <summary>The table with its caption above it, and a space below.</summary>
     /// <param name="table">The table.</param>
