@@ -17,14 +17,21 @@ internal static class InputsSection
             ],
             [.. facts.Site.Inputs.Select(input => Row(input, facts))]);
         yield return new Paragraph(
-            "Rates are positive for extraction and negative for injection. One year is 365.25 days. The site file in the appendix holds "
-            + "all inputs, outlines of plumes included.");
+            "One year is 365.25 days. The site file in the appendix holds all inputs, outlines of plumes included.");
     }
 
     private static ImmutableArray<string> Row(InputEntry input, Facts facts)
     {
         (string value, string unit) = Value(input, facts);
-        return [input.Label, value, unit, input.Written, input.UsualRange, input.Source.Length == 0 ? "source not given" : input.Source];
+        return [Label(input), value, unit, input.Written, input.UsualRange, input.Source.Length == 0 ? "source not given" : input.Source];
+    }
+
+    /// <summary>The label with the name of the well or plume, which stands in the key: <c>well.RW-1.extracts</c>.</summary>
+    private static string Label(InputEntry input)
+    {
+        int first = input.Key.IndexOf('.', StringComparison.Ordinal), last = input.Key.LastIndexOf('.');
+        string name = last > first ? input.Key[(first + 1)..last] : "";
+        return input.Label.Contains(name, StringComparison.Ordinal) ? input.Label : $"{name}: {input.Label}";
     }
 
     private static (string Value, string Unit) Value(InputEntry input, Facts facts)

@@ -79,6 +79,18 @@ public sealed class MemoTextTests
     }
 
     [Fact]
+    public void An_input_of_a_well_or_plume_bears_its_name()
+    {
+        InputEntry rate = new("well.RW-1.extracts", "Extraction rate", "6.5 L/s", QuantityKind.Rate, 561.6, "", "");
+        InputEntry outline = new("plume.TCE, 2.5 ug/L.outline", "Plume outline", "16 corners", QuantityKind.Area, 1000, "", "");
+        InputEntry place = new("regional_flow.head_at", "Place of the known head", "[1.0, 2.0]", QuantityKind.Place, 0, "", "");
+        Table inputs = Tables(Sample with { Site = Sample.Site with { Inputs = [rate, outline, place] } })[0];
+        Assert.Equal(["RW-1: Extraction rate", "561.6", "m3/d", "6.5 L/s", "", "source not given"], inputs.Rows[0].AsEnumerable());
+        Assert.Equal("TCE, 2.5 ug/L: Plume outline", inputs.Rows[1][0]);
+        Assert.Equal(["Place of the known head", "", "", "[1.0, 2.0]"], inputs.Rows[2].Take(4));
+    }
+
+    [Fact]
     public void Every_row_has_as_many_cells_as_its_header()
     {
         Assert.All(Tables(Sample), table => Assert.All(table.Rows, row => Assert.Equal(table.Columns.Length, row.Length)));
