@@ -12,8 +12,8 @@ internal static class InputsSection
         yield return new Table(
             "Inputs of the calculation.",
             [
-                new("Input", 25), new("Value", 12, IsNumeric: true), new("Unit", 10), new("As written", 15), new("Usual range", 20),
-                new("Source", 22),
+                new("Input", 21), new("Value", 9, IsNumeric: true), new("Unit", 9), new("As written", 20), new("Usual range", 22),
+                new("Source", 19),
             ],
             [.. facts.Site.Inputs.Select(input => Row(input, facts))]);
         yield return new Paragraph(

@@ -62,7 +62,7 @@ internal static class WordStyles
         Paragraph(Label, "Form Label", 19, Space(20, 20), isBold: true),
         Paragraph(Value, "Form Value", 19, Space(20, 20)),
         Paragraph(Gap, "Gap", 8, Space(0, 60)),
-        Paragraph(Code, "Code", 15, Space(0, 0), font: Mono),
+        Paragraph(Code, "Code", 14, Space(0, 0), font: Mono),
         Paragraph(Picture, "Picture", 20, [new KeepNext(), .. Space(120, 60), new Justification { Val = JustificationValues.Center }]),
         Paragraph(Header, "header", 15, Space(0, 0)),
         Paragraph(Footer, "footer", 15, Space(0, 0)));
@@ -76,7 +76,12 @@ internal static class WordStyles
         id,
         name,
         halfPoints,
-        [new KeepNext(), new KeepLines(), .. space, .. level is { } value ? [new OutlineLevel { Val = value }] : Array.Empty<OpenXmlElement>()],
+        [
+            new KeepNext(),
+            new KeepLines(),
+            .. space,
+            .. level is { } value ? [new OutlineLevel { Val = value }] : Array.Empty<OpenXmlElement>(),
+        ],
         isBold: true,
         colour: Ink);
 
@@ -92,7 +97,13 @@ internal static class WordStyles
         string font = Sans,
         string? colour = null)
     {
-        Style style = new() { Type = StyleValues.Paragraph, StyleId = id, Default = isDefault ? true : null, CustomStyle = IsOwn(id) ? true : null };
+        Style style = new()
+        {
+            Type = StyleValues.Paragraph,
+            StyleId = id,
+            Default = isDefault ? true : null,
+            CustomStyle = IsOwn(id) ? true : null,
+        };
         style.Append(new StyleName { Val = name });
         if (!isDefault)
         {
@@ -103,7 +114,8 @@ internal static class WordStyles
         return style;
     }
 
-    private static bool IsOwn(string id) => id is Verdict or Warning or Caution or Cell or HeaderCell or Label or Value or Gap or Code or Picture;
+    private static bool IsOwn(string id) =>
+        id is Verdict or Warning or Caution or Cell or HeaderCell or Label or Value or Gap or Code or Picture;
 
     private static StyleRunProperties Look(int halfPoints, bool isBold, bool isItalic, string font, string? colour)
     {

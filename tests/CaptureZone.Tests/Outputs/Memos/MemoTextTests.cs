@@ -72,7 +72,10 @@ public sealed class MemoTextTests
         Assert.Equal(1, inputs.Number);
         Assert.Equal(Sample.Site.Inputs.Length, inputs.Rows.Length);
         Assert.Equal(
-            ["Hydraulic conductivity", "18", "m/d", "18 m/d", "0.1 to 1000 m/d (common practice, no source)", "pumping test PT-1, May 2026"],
+            [
+                "Hydraulic conductivity", "18", "m/d", "18 m/d", "0.1 to 1000 m/d (common practice, no source)",
+                "pumping test PT-1, May 2026",
+            ],
             inputs.Rows[0].AsEnumerable());
         Assert.Equal("source not given", inputs.Rows[3][^1]);
         Assert.Equal(["59.055", "ft/d", "18 m/d"], Tables(SampleReport.Create(ReportUnits.Us))[0].Rows[0].Skip(1).Take(3));
