@@ -89,7 +89,8 @@ internal static class HandCheckSection
                 + "regional water, which narrows the zones far upgradient."
             : "Here one well acts alone, so computed and hand values should agree.";
         return $"Distances and widths by hand hold for one well alone in uniform flow. {why} The radii should agree "
-            + "however many wells act, because a travel-time zone holds what the well takes in the time, whatever its shape; they differ where injected water "
+            + "however many wells act, because a travel-time zone holds what the well takes in the time, "
+            + "whatever its shape; they differ where injected water "
             + "enters inside the zone or the saturated thickness is not b everywhere.";
     }
 }

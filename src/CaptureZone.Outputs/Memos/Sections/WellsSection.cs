@@ -30,7 +30,8 @@ internal static class WellsSection
             [.. facts.Answers.Wells.Select(answer => Levels(facts.Wells[answer.Well], answer, facts))]);
         yield return new Paragraph(
             "Rates are positive for extraction and negative for injection. The head is the mean round the screen, without "
-            + "losses inside the well. The drawdown is the head with all wells off less the head with them on, under the same known head; negative where the level rises. The largest rate, the others held, brings the "
+            + "losses inside the well. The drawdown is the head with all wells off less the head with them on, under "
+            + "the same known head; negative where the level rises. The largest rate, the others held, brings the "
             + "level at the screen to the base: a theoretical ceiling and not a rate to pump.");
     }
 
