@@ -8,8 +8,8 @@ internal static class LabelSpots
     /// <summary>Steps outward when the places beside a thing are taken, units of the sheet.</summary>
     private const float RingStep = 32;
 
-    /// <summary>No label is farther from its thing than the sheet is wide.</summary>
-    private const int Rings = (int)(Look.SheetWidth / RingStep);
+    /// <summary>How far a label may move away: a longer leader is not followed by the eye.</summary>
+    private const int Rings = (int)(Look.LongestLeader / RingStep);
 
     private const int Directions = 24;
 

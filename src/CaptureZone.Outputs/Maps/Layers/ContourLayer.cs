@@ -16,6 +16,9 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
 
     private const int MostDecimals = 4;
 
+    /// <summary>For an interval that no number of decimals gives exactly.</summary>
+    private const int UsualDecimals = 2;
+
     /// <summary>A line is at a round multiple of the interval when it is nearer than this share of it.</summary>
     private const double Nearly = 1e-6;
 
@@ -79,7 +82,7 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
     /// <summary>As many decimals as the interval has.</summary>
     private string Text(double value)
     {
-        int decimals = Enumerable.Range(0, MostDecimals).FirstOrDefault(IsEnough, MostDecimals);
+        int decimals = Enumerable.Range(0, MostDecimals + 1).FirstOrDefault(IsEnough, UsualDecimals);
         return value.ToString(string.Create(CultureInfo.InvariantCulture, $"F{decimals}"), CultureInfo.InvariantCulture);
     }
 
