@@ -1,5 +1,6 @@
 using System.Globalization;
 using CaptureZone.Sites;
+using CaptureZone.Sites.Units;
 
 namespace CaptureZone.Outputs.Text;
 
@@ -25,29 +26,16 @@ public sealed class Printer(ReportUnits units)
     /// <summary>Decimals of a share in per cent.</summary>
     private const int PercentDecimals = 1;
 
-    /// <summary>Below this, m2, areas print in small units: 1 ha.</summary>
-    private const double LargeMetricArea = Hectare;
-
-    private const double Foot = 0.3048;
-    private const double Hectare = 10_000;
-    private const double Acre = 43_560 * Foot * Foot;
-    private const double LitresPerSecond = 86.4;
-
-    /// <summary>US gallon: 231 cubic inches of 0.0254 m; a minute is 1/1440 d.</summary>
-    private const double GallonsPerMinute = 231 * 0.0254 * 0.0254 * 0.0254 * 1440;
-
-    /// <summary>A year of 365.25 d.</summary>
-    private const double Year = 365.25;
-
     /// <summary>Times from here on print in years, d.</summary>
-    private const double LongTime = 2 * Year;
+    private static readonly double LongTime = 2 * Factor("yr");
 
     private bool Us => units == ReportUnits.Us;
 
     /// <summary>A value in the unit that <see cref="Unit"/> names.</summary>
     /// <param name="kind">What kind of quantity.</param>
     /// <param name="value">The value in metres and days.</param>
-    public double In(QuantityKind kind, double value) => Us ? value / UsUnit(kind) : value;
+    public double In(QuantityKind kind, double value) =>
+        kind is QuantityKind.Ratio or QuantityKind.Direction or QuantityKind.Place ? value : value / Factor(Unit(kind));
 
     /// <summary>The unit of a kind of quantity, for the head of a column; empty where there is none.</summary>
     /// <param name="kind">What kind of quantity.</param>
@@ -98,14 +86,14 @@ public sealed class Printer(ReportUnits units)
     /// <param name="cubicMetresPerDay">The rate, m3/d; null: "none".</param>
     public string Rate(double? cubicMetresPerDay) =>
         cubicMetresPerDay is { } rate && !Us && double.IsFinite(rate)
-            ? $"{Plain(QuantityKind.Rate, rate)} ({Figures(rate / LitresPerSecond, ComputedFigures)} L/s)"
+            ? $"{Plain(QuantityKind.Rate, rate)} ({Scaled(rate, "L/s")})"
             : Plain(QuantityKind.Rate, cubicMetresPerDay);
 
     /// <summary>A rate in the unit that people speak of, without a second unit: L/s or gpm; short, for labels.</summary>
     /// <param name="cubicMetresPerDay">The rate, m3/d; null: "none".</param>
     public string ShortRate(double? cubicMetresPerDay) =>
         cubicMetresPerDay is { } rate && !Us && double.IsFinite(rate)
-            ? WithUnit(Figures(rate / LitresPerSecond, ComputedFigures), "L/s")
+            ? Scaled(rate, "L/s")
             : Plain(QuantityKind.Rate, cubicMetresPerDay);
 
     /// <summary>A hydraulic conductivity with its unit.</summary>
@@ -120,16 +108,16 @@ public sealed class Printer(ReportUnits units)
     /// <param name="squareMetres">The area, m2; null: "none".</param>
     public string Area(double? squareMetres)
     {
-        double large = Us ? Acre : LargeMetricArea;
-        return squareMetres is { } area && double.IsFinite(area) && Math.Abs(area) >= large
-            ? WithUnit(Figures(area / large, ComputedFigures), Us ? "acres" : "ha")
+        string large = Us ? "acre" : "ha";
+        return squareMetres is { } area && double.IsFinite(area) && Math.Abs(area) >= Factor(large)
+            ? Scaled(area, large) + (Us ? "s" : "")
             : Plain(QuantityKind.Area, squareMetres);
     }
 
     /// <summary>A time with its unit: days below 2 years of 365.25 d, else years.</summary>
     /// <param name="days">The time, d; null: "none".</param>
     public string Time(double? days) => days is { } time && double.IsFinite(time) && Math.Abs(time) >= LongTime
-        ? WithUnit(Figures(time / Year, ComputedFigures), "yr")
+        ? Scaled(time, "yr")
         : Plain(QuantityKind.Time, days);
 
     /// <summary>A plain ratio.</summary>
@@ -155,16 +143,12 @@ public sealed class Printer(ReportUnits units)
         };
     }
 
-    private static double UsUnit(QuantityKind kind) => kind switch
-    {
-        QuantityKind.Length or QuantityKind.Conductivity => Foot,
-        QuantityKind.Transmissivity or QuantityKind.Area => Foot * Foot,
-        QuantityKind.Rate => GallonsPerMinute,
-        _ => 1,
-    };
+    private static double Factor(string unit) => UnitTable.Named(unit).Factor;
 
     private string Plain(QuantityKind kind, double? value) =>
         value is { } number && double.IsFinite(number) ? WithUnit(Number(kind, value), Unit(kind)) : Number(kind, value);
+
+    private static string Scaled(double value, string unit) => WithUnit(Figures(value / Factor(unit), ComputedFigures), unit);
 
     private static string WithUnit(string number, string unit) => unit.Length == 0 ? number : $"{number} {unit}";
 
