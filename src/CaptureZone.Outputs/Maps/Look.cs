@@ -88,7 +88,8 @@ internal static class Look
 
     private static SKColor Glowing(SKColor below)
     {
-        return new(Mixed(ContainmentGlow.Red, below.Red), Mixed(ContainmentGlow.Green, below.Green), Mixed(ContainmentGlow.Blue, below.Blue));
+        SKColor glow = ContainmentGlow;
+        return new(Mixed(glow.Red, below.Red), Mixed(glow.Green, below.Green), Mixed(glow.Blue, below.Blue));
 
         static byte Mixed(byte glow, byte below) =>
             (byte)((glow * ContainmentGlowAlpha + below * (byte.MaxValue - ContainmentGlowAlpha)) / byte.MaxValue);

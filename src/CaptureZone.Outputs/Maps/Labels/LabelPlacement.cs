@@ -20,7 +20,8 @@ internal sealed record LabelPlacement(
     /// <param name="symbols">What they may not cover.</param>
     /// <param name="heavyLines">What they cover only where nothing else is free beside their thing.</param>
     /// <param name="requests">The labels, most important first.</param>
-    public static LabelPlacement Of(SKRect area, IReadOnlyList<LabelBox> symbols, IReadOnlyList<LabelBox> heavyLines, IEnumerable<LabelRequest> requests)
+    public static LabelPlacement Of(
+        SKRect area, IReadOnlyList<LabelBox> symbols, IReadOnlyList<LabelBox> heavyLines, IEnumerable<LabelRequest> requests)
     {
         List<LabelBox> taken = [.. symbols];
         List<PlacedLabel> labels = [];

@@ -42,7 +42,10 @@ public sealed class LabelTests
     {
         Report report = MapCases.Clustered(11, 14);
         MapSheet sheet = new(report);
-        LabelBox[] wells = [.. report.Site.Model.Wells.Select(well => new LabelBox(sheet.View.At(well.At), Look.SymbolRadius, Look.SymbolRadius, 0))];
+        LabelBox[] wells =
+        [
+            .. report.Site.Model.Wells.Select(well => new LabelBox(sheet.View.At(well.At), Look.SymbolRadius, Look.SymbolRadius, 0)),
+        ];
         Assert.All(sheet.Placement.Labels, label =>
         {
             Assert.True(label.Box.Within(sheet.View.Area));

@@ -19,7 +19,7 @@ public sealed partial class LookPageTests
     [Fact]
     public void The_page_states_every_colour_of_the_code_and_no_other()
     {
-        Dictionary<string, SKColor> stated = Rows().ToDictionary(row => row.Groups["name"].Value, row => SKColor.Parse(row.Groups["hex"].Value));
+        Dictionary<string, SKColor> stated = Rows().ToDictionary(row => row.Groups["name"].Value, Stated);
         Dictionary<string, SKColor> used = typeof(Look).GetFields(BindingFlags.Static | BindingFlags.Public)
             .Where(field => field.FieldType == typeof(SKColor)).ToDictionary(field => field.Name, field => (SKColor)field.GetValue(null)!);
         Assert.NotEmpty(used);
@@ -29,7 +29,7 @@ public sealed partial class LookPageTests
     [Fact]
     public void The_page_states_the_lightness_of_its_colours() => Assert.All(Rows(), row =>
         Assert.Equal(
-            double.Parse(row.Groups["light"].Value, CultureInfo.InvariantCulture), Lightness(SKColor.Parse(row.Groups["hex"].Value)), 0.051));
+            double.Parse(row.Groups["light"].Value, CultureInfo.InvariantCulture), Lightness(Stated(row)), 0.051));
 
     [Fact]
     public void Fills_that_can_lie_side_by_side_differ_in_grey_print()
@@ -59,6 +59,8 @@ public sealed partial class LookPageTests
             return value <= 0.04045 ? value / 12.92 : Math.Pow((value + 0.055) / 1.055, 2.4);
         }
     }
+
+    private static SKColor Stated(Match row) => SKColor.Parse(row.Groups["hex"].Value);
 
     private static MatchCollection Rows() => ColorRow().Matches(File.ReadAllText(Path.Combine(Root(), "docs", "look.md")));
 

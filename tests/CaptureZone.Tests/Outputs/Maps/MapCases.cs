@@ -12,7 +12,7 @@ namespace CaptureZone.Tests.Outputs.Maps;
 /// <summary>Maps for tests: seeded sites with clustered wells, and a canvas that keeps what is written on it.</summary>
 internal static class MapCases
 {
-    /// <summary>The sample with other wells in a frame of another shape: most in clusters of a few metres, some idle, some injecting.</summary>
+    /// <summary>The sample with other wells, most in clusters of a few metres, some idle, some injecting, in another frame.</summary>
     public static Report Clustered(int seed, int wells)
     {
         Random random = new(seed);
@@ -21,7 +21,8 @@ internal static class MapCases
         Envelope extent = new(-900, 1300, -height / 2, height / 2);
         Complex[] middles = [.. Enumerable.Range(0, 1 + random.Next(4)).Select(_ => Anywhere(random, extent))];
         IEnumerable<Element> others = sample.Site.Model.Elements.Where(element => element is not Well);
-        Model model = sample.Site.Model with { Elements = [.. others, .. Enumerable.Range(0, wells).Select(i => MakeWell(random, i, middles, extent))] };
+        Well[] made = [.. Enumerable.Range(0, wells).Select(i => MakeWell(random, i, middles, extent))];
+        Model model = sample.Site.Model with { Elements = [.. others, .. made] };
         return sample with
         {
             Site = sample.Site with { Model = model },

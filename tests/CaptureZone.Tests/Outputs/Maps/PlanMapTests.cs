@@ -109,7 +109,8 @@ public sealed class PlanMapTests
     {
         Report report = SampleReport.Create();
         PlanView view = new MapSheet(report).View;
-        Polygon zone = report.Answers.Wells.Select(well => well.Zone?.Polygon).OfType<Polygon>().Single(polygon => polygon.NumInteriorRings == 1);
+        Polygon zone = report.Answers.Wells.Select(well => well.Zone?.Polygon).OfType<Polygon>()
+            .Single(polygon => polygon.NumInteriorRings == 1);
         using SKBitmap picture = SKBitmap.Decode(Sample.Value.Png);
         Assert.Equal(Look.Paper, Prevailing(picture, view.At(zone.GetInteriorRingN(0).Centroid.Coordinate)));
         Assert.Equal(Look.SupplyTint1, Prevailing(picture, view.At(zone.InteriorPoint.Coordinate)));
