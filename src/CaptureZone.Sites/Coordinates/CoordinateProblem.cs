@@ -34,7 +34,8 @@ internal static class CoordinateProblem
             $"{Quote(stated)} is web mercator, whose metres are not metres on the ground; {UtmHint}",
         _ when GeographicName(code) is { } name =>
             $"{Quote(stated)} is longitude/latitude ({name}), not a plane system in metres or feet; {UtmHint}",
-        _ => $"{Quote(stated)} is not among the codes that are known (UTM zones: EPSG:32601-32660, 32701-32760, 26901-26923, 25828-25838); {FileHint}",
+        _ => $"{Quote(stated)} is not among the codes that are known (UTM zones: EPSG:32601-32660, 32701-32760, 26901-26923, "
+            + $"25828-25838); {FileHint}",
     };
 
     /// <summary>A file that cannot be used.</summary>

@@ -80,7 +80,8 @@ public sealed record Datum(
     public static Datum? Find(string name)
     {
         string plain = Plain(name.StartsWith("D_", StringComparison.Ordinal) ? name[2..] : name);
-        return Checked.FirstOrDefault(datum => plain == Plain(datum.WktName) || plain == Plain(datum.EsriName) || plain == Plain(datum.Name));
+        return Checked.FirstOrDefault(
+            datum => plain == Plain(datum.WktName) || plain == Plain(datum.EsriName) || plain == Plain(datum.Name));
     }
 
     private static string Plain(string name) => string.Concat(name.Where(char.IsAsciiLetterOrDigit)).ToUpperInvariant();

@@ -17,6 +17,8 @@ internal static class DefinitionReader
 
     private const double DegreeInRadians = Math.PI / 180;
 
+    private const string SaveAgain = "save the definition again";
+
     private const string KnownDatums = "known are WGS 84, NAD83 (also HARN, CORS96, NSRS2007, 2011, CSRS) and ETRS89";
 
     private const string KnownProjections =
@@ -28,7 +30,8 @@ internal static class DefinitionReader
     public static ProjectedDefinition Read(string text)
     {
         WktNode root = WktParser.Parse(text) ?? throw new RefusedDefinitionException(
-            "is not one definition in well-known text (PROJCS[...]); save the system's definition again as .prj, without a vertical system");
+            "is not one definition in well-known text (PROJCS[...]); save the system's definition again as .prj, "
+            + "without a vertical system");
         CheckRoot(root);
         CheckParts(root, "GEOGCS", "PROJECTION", "PARAMETER", "UNIT", "AXIS", "AUTHORITY", "METADATA");
         CheckAxes(root);
@@ -42,16 +45,18 @@ internal static class DefinitionReader
     /// <summary>Whether a definition that can be read has the form of .prj files, whose names of datums start with "D_".</summary>
     /// <param name="text">The text.</param>
     public static bool IsEsri(string text) => WktParser.Parse(text) is { } root
-        && root.Of("GEOGCS").SelectMany(geographic => geographic.Of("DATUM")).Any(datum => datum.Name.StartsWith("D_", StringComparison.Ordinal));
+        && root.Of("GEOGCS")
+            .SelectMany(geographic => geographic.Of("DATUM"))
+            .Any(datum => datum.Name.StartsWith("D_", StringComparison.Ordinal));
 
     /// <summary>A code that is known must belong to the definition: a GIS may follow either.</summary>
     private static void CheckAuthority(WktNode root, ProjectedDefinition definition)
     {
         double? code = root.Of("AUTHORITY").FirstOrDefault(authority => authority.Name == "EPSG")?.Number(1);
         UtmZone? claimed = code is > 0 and < int.MaxValue ? UtmZone.OfCode((int)code) : null;
-        Refuse(claimed is null || claimed.Definition.SameSystem(definition)
-            ? null
-            : $"says that it is {claimed.Definition.Name} by its code, but defines another system; save the definition again");
+        Require(
+            claimed is null || claimed.Definition.SameSystem(definition),
+            $"says that it is {claimed?.Definition.Name} by its code, but defines another system; {SaveAgain}");
     }
 
     private static void CheckRoot(WktNode root)
@@ -67,7 +72,7 @@ internal static class DefinitionReader
             "LOCAL_CS" => "is a local system; write crs = \"local m\" or \"local ft\"",
             _ => $"is a {root.Keyword}, not a projected system (PROJCS); give the definition of the site's plane system",
         };
-        Refuse(problem);
+        Require(problem is null, problem ?? string.Empty);
     }
 
     private static Datum ReadDatum(WktNode geographic)
@@ -79,17 +84,22 @@ internal static class DefinitionReader
             ?? throw new RefusedDefinitionException($"has the datum '{node.Name}', which was not checked; {KnownDatums}");
         CheckEllipsoid(Only(node, "SPHEROID"), datum);
         bool shifts = node.Of("TOWGS84").Any(shift => Enumerable.Range(0, shift.Values.Length).Any(i => shift.Number(i) is not 0));
-        Refuse(shifts ? "has a TOWGS84 shift that is not zero, which was not checked; use the definition without it" : null);
-        Refuse(Only(geographic, "PRIMEM").Number(1) is 0 ? null : "has another prime meridian than Greenwich, which was not checked; use a system of Greenwich");
-        double? degree = Only(geographic, "UNIT").Number(1);
-        Refuse(Near(degree, DegreeInRadians) ? null : "gives angles in another unit than degrees, which was not checked; use a system in degrees");
+        Require(!shifts, "has a TOWGS84 shift that is not zero, which was not checked; use the definition without it");
+        Require(
+            Only(geographic, "PRIMEM").Number(1) is 0,
+            "has another prime meridian than Greenwich, which was not checked; use a system of Greenwich");
+        Require(
+            Near(Only(geographic, "UNIT").Number(1), DegreeInRadians),
+            "gives angles in another unit than degrees, which was not checked; use a system in degrees");
         return datum;
     }
 
     private static void CheckEllipsoid(WktNode spheroid, Datum datum)
     {
         bool same = Near(spheroid.Number(1), datum.Ellipsoid.SemiMajorAxis) && Near(spheroid.Number(2), datum.Ellipsoid.InverseFlattening);
-        Refuse(same ? null : $"has another ellipsoid ('{spheroid.Name}') than its datum {datum.Name} has ({datum.Ellipsoid.Name}); save the definition again");
+        Require(
+            same,
+            $"has another ellipsoid ('{spheroid.Name}') than its datum {datum.Name} has ({datum.Ellipsoid.Name}); {SaveAgain}");
     }
 
     private static ProjectionMethod ReadMethod(WktNode projection, WktNode root)
@@ -105,7 +115,7 @@ internal static class DefinitionReader
     {
         WktNode[] given = [.. root.Of("PARAMETER")];
         WktNode? unknown = given.FirstOrDefault(node => !method.Parameters.Any(parameter => Names(parameter, node)));
-        Refuse(unknown is null ? null : $"has the parameter '{unknown.Name}', which {method.WktName} does not have; save the definition again");
+        Require(unknown is null, $"has the parameter '{unknown?.Name}', which {method.WktName} does not have; {SaveAgain}");
         ImmutableArray<double> values = [.. method.Parameters.Select(parameter => ReadParameter(given, parameter))];
         if (method != ProjectionMethod.TransverseMercator)
         {
@@ -120,7 +130,7 @@ internal static class DefinitionReader
         WktNode[] named = [.. given.Where(node => Names(parameter, node))];
         double value = named is [{ } one] && one.Number(1) is { } number
             ? number
-            : throw new RefusedDefinitionException($"must give the parameter '{parameter.WktName}' once, as a number; save the definition again");
+            : throw new RefusedDefinitionException($"must give the parameter '{parameter.WktName}' once, as a number; {SaveAgain}");
         double limit = parameter.Kind switch
         {
             ParameterKind.Latitude => 90,
@@ -129,15 +139,14 @@ internal static class DefinitionReader
             _ => double.MaxValue,
         };
         bool possible = Math.Abs(value) <= limit && (parameter.Kind != ParameterKind.Scale || value > 0);
-        Refuse(possible ? null : $"has an impossible value for the parameter '{parameter.WktName}'; save the definition again");
+        Require(possible, $"has an impossible value for the parameter '{parameter.WktName}'; {SaveAgain}");
         return value;
     }
 
     /// <summary>Parallels that mirror each other in the equator make the cone a cylinder, for which the formulas fail.</summary>
-    private static void CheckParallels(double first, double second) => Refuse(
-        Math.Abs(first + second) > PrintTolerance && Math.Abs(first) < 90 && Math.Abs(second) < 90
-            ? null
-            : "has standard parallels that make no cone; save the definition again");
+    private static void CheckParallels(double first, double second) => Require(
+        Math.Abs(first + second) > PrintTolerance && Math.Abs(first) < 90 && Math.Abs(second) < 90,
+        $"has standard parallels that make no cone; {SaveAgain}");
 
     private static GridUnit ReadUnit(WktNode unit) => unit.Number(1) is { } metres && GridUnit.OfLength(metres) is { } known
         ? known
@@ -147,22 +156,23 @@ internal static class DefinitionReader
     private static void CheckAxes(WktNode root)
     {
         string[] directions = [.. root.Of("AXIS").Select(axis => axis.Values.LastOrDefault(string.Empty).ToUpperInvariant())];
-        Refuse(directions is [] or ["EAST", "NORTH"]
-            ? null
-            : $"has its axes toward {string.Join(" and ", directions)}, which was not checked; use a system of easting and northing");
+        Require(
+            directions is [] or ["EAST", "NORTH"],
+            $"has its axes toward {string.Join(" and ", directions)}, which was not checked; use a system of easting and northing");
     }
 
     private static void CheckParts(WktNode node, params string[] known)
     {
         WktNode? other = node.Nodes.FirstOrDefault(inner => !known.Contains(inner.Keyword));
-        Refuse(other is null
-            ? null
-            : $"has the part {other.Keyword} in {node.Keyword}, which was not checked; use the definition without it if the system is the same");
+        Require(
+            other is null,
+            $"has the part {other?.Keyword} in {node.Keyword}, which was not checked; "
+            + "use the definition without it if the system is the same");
     }
 
     private static WktNode Only(WktNode node, string keyword) => node.Of(keyword).ToArray() is [{ } one]
         ? one
-        : throw new RefusedDefinitionException($"must have one {keyword} in {node.Keyword}; save the definition again");
+        : throw new RefusedDefinitionException($"must have one {keyword} in {node.Keyword}; {SaveAgain}");
 
     private static bool Names(ProjectionParameterName parameter, WktNode node) =>
         Plain(node.Name) == Plain(parameter.WktName) || Plain(node.Name) == Plain(parameter.EsriName);
@@ -171,9 +181,9 @@ internal static class DefinitionReader
 
     private static bool Near(double? value, double expected) => value is { } given && Math.Abs(given / expected - 1) < PrintTolerance;
 
-    private static void Refuse(string? problem)
+    private static void Require(bool holds, string problem)
     {
-        if (problem is not null)
+        if (!holds)
         {
             throw new RefusedDefinitionException(problem);
         }

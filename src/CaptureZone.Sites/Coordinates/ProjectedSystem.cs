@@ -10,7 +10,10 @@ public sealed record ProjectedSystem : CoordinateSystem
     /// </summary>
     private const double RoundTripTolerance = 0.01;
 
-    /// <summary>Eastings of a UTM zone reach from here, m ... (the zone's edge lies at 166 to 834 km at the equator; half a zone is allowed beyond.)</summary>
+    /// <summary>
+    /// Eastings of a UTM zone reach from here, m ... (at the equator a zone's edges lie at 166 and 834 km: a quarter of a zone is
+    /// allowed beyond each.)
+    /// </summary>
     private const double UtmSmallestEasting = 0;
 
     /// <summary>... to here, m.</summary>
@@ -53,15 +56,20 @@ public sealed record ProjectedSystem : CoordinateSystem
         if (LooksLikeLonLat(x, y))
         {
             string zone = CoordinateSystems.UtmSuggestion(x, y) is { } utm ? $", such as {utm}" : string.Empty;
-            return $"{place} looks like longitude and latitude; {Name} takes eastings and northings in {Unit}: project the site's coordinates to a plane system{zone}";
+            return $"{place} looks like longitude and latitude; {Name} takes eastings and northings in {Unit}: "
+                + $"project the site's coordinates to a plane system{zone}";
         }
 
         if (Epsg is not null && !IsNearUtmZone(x, y))
         {
-            return $"{place} is far outside {Name}, where eastings are 0 to 1000000 m and northings 0 to 10000000 m; check the order (easting, northing) and the zone";
+            return $"{place} is far outside {Name}, where eastings are 0 to 1000000 m and northings 0 to 10000000 m; "
+                + "check the order (easting, northing) and the zone";
         }
 
-        return ComesBack(x, y) ? null : $"{place} is outside the area where {Name} can be used; check the coordinates, their order (easting, northing) and their unit ({Unit})";
+        return ComesBack(x, y)
+            ? null
+            : $"{place} is outside the area where {Name} can be used; "
+                + $"check the coordinates, their order (easting, northing) and their unit ({Unit})";
     }
 
     /// <summary>Systems are the same when everything that they state is.</summary>

@@ -46,7 +46,7 @@ public sealed class Projector(ProjectedDefinition definition)
             definition.Name,
             geographic,
             make.CreateProjection(definition.Method.WktName, definition.Method.WktName, parameters),
-            new LinearUnit(definition.Unit.Metres, definition.Unit.WktName, "EPSG", definition.Unit.Epsg, string.Empty, string.Empty, string.Empty),
+            Linear(definition.Unit),
             new AxisInfo("Easting", AxisOrientationEnum.East),
             new AxisInfo("Northing", AxisOrientationEnum.North));
         var between = new CoordinateTransformationFactory();
@@ -54,4 +54,7 @@ public sealed class Projector(ProjectedDefinition definition)
             between.CreateFromCoordinateSystems(geographic, projected).MathTransform,
             between.CreateFromCoordinateSystems(projected, geographic).MathTransform);
     }
+
+    private static LinearUnit Linear(GridUnit unit) =>
+        new(unit.Metres, unit.WktName, "EPSG", unit.Epsg, string.Empty, string.Empty, string.Empty);
 }

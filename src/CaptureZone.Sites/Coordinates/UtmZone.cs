@@ -3,8 +3,9 @@ using System.Collections.Immutable;
 namespace CaptureZone.Sites.Coordinates;
 
 /// <summary>
-/// A zone of the Universal Transverse Mercator grid. Its constants - zones of 6 degrees from 180 degrees west, scale 0.9996, false easting 500 km, false northing
-/// 0 or 10 000 km - and EPSG codes are from memory (J. P. Snyder, Map Projections: A Working Manual, 1987; EPSG's data set).
+/// A zone of the Universal Transverse Mercator grid. Its constants - zones of 6 degrees from 180 degrees west, scale 0.9996, false
+/// easting 500 km, false northing 0 or 10 000 km - and EPSG codes are from memory (J. P. Snyder, Map Projections: A Working Manual,
+/// 1987; EPSG's data set).
 /// </summary>
 /// <param name="Number">1 to 60, from 180 degrees west to the east.</param>
 /// <param name="IsSouth">Whether it counts northings for the southern hemisphere.</param>

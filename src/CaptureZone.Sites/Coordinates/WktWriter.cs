@@ -11,7 +11,13 @@ internal static class WktWriter
     /// <summary>Order in which .prj files list parameters.</summary>
     private static readonly string[] EsriOrder =
     [
-        "False_Easting", "False_Northing", "Central_Meridian", "Scale_Factor", "Standard_Parallel_1", "Standard_Parallel_2", "Latitude_Of_Origin",
+        "False_Easting",
+        "False_Northing",
+        "Central_Meridian",
+        "Scale_Factor",
+        "Standard_Parallel_1",
+        "Standard_Parallel_2",
+        "Latitude_Of_Origin",
     ];
 
     /// <summary>WKT1 (OGC 01-009) as for a GeoPackage.</summary>
@@ -24,7 +30,8 @@ internal static class WktWriter
         string parameters = string.Concat(definition.Method.Parameters.Select(
             (parameter, i) => $"PARAMETER[\"{parameter.WktName}\",{Number(definition.Values[i])}],"));
         return $"PROJCS[\"{Quoted(definition.Name)}\",GEOGCS[\"{datum.Name}\",DATUM[\"{datum.WktName}\","
-            + $"SPHEROID[\"{ellipsoid.Name}\",{Number(ellipsoid.SemiMajorAxis)},{Number(ellipsoid.InverseFlattening)}{Authority(ellipsoid.Epsg)}]"
+            + $"SPHEROID[\"{ellipsoid.Name}\",{Number(ellipsoid.SemiMajorAxis)},{Number(ellipsoid.InverseFlattening)}"
+            + $"{Authority(ellipsoid.Epsg)}]"
             + $"{Authority(datum.Epsg)}],PRIMEM[\"Greenwich\",0{Authority(8901)}],UNIT[\"degree\",{Degree}{Authority(9122)}]"
             + $"{Authority(datum.GeographicEpsg)}],PROJECTION[\"{definition.Method.WktName}\"],{parameters}"
             + $"UNIT[\"{definition.Unit.WktName}\",{Number(definition.Unit.Metres)}{Authority(definition.Unit.Epsg)}],"

@@ -1,0 +1,124 @@
+using System.Collections.Immutable;
+using System.Numerics;
+using CaptureZone.Flow;
+using CaptureZone.Tracing;
+using NetTopologySuite.Geometries;
+
+namespace CaptureZone.Topology;
+
+/// <summary>
+/// Stagnation points and dividing streamlines of a field: the only place where it is decided where water comes from and goes to.
+/// Immutable and thread-safe.
+/// </summary>
+public sealed class FlowTopology
+{
+    private FlowTopology(Tracer tracer, ImmutableArray<DividingBranch> branches)
+    {
+        Tracer = tracer;
+        Branches = branches;
+    }
+
+    /// <summary>Follows paths among these stagnation points.</summary>
+    public Tracer Tracer { get; }
+
+    /// <summary>The field.</summary>
+    public FlowField Field => Tracer.Stops.Field;
+
+    /// <summary>Where paths end.</summary>
+    public PathStops Stops => Tracer.Stops;
+
+    /// <summary>The stagnation points.</summary>
+    public ImmutableArray<StagnationPoint> Points => Stops.Stagnation.Points;
+
+    /// <summary>Whether it is certain that no stagnation point is missing.</summary>
+    public bool Complete => Stops.Stagnation.Complete;
+
+    /// <summary>All branches, saddle by saddle, each in its order.</summary>
+    public ImmutableArray<DividingBranch> Branches { get; }
+
+    /// <summary>Finds the topology of a field.</summary>
+    /// <param name="field">The field.</param>
+    /// <param name="reach">Radius about the site's centre that must lie well inside the circle at which paths end, m.</param>
+    /// <param name="extent">Where the vertices of dividing streamlines are wanted close together, m.</param>
+    /// <param name="workers">Who does the work.</param>
+    /// <param name="cancel">Stops the work.</param>
+    public static FlowTopology Find(
+        FlowField field, double reach, Envelope extent, IWorkers workers, CancellationToken cancel)
+    {
+        StagnationSet stagnation = StagnationFinder.Find(field);
+        PathStops stops = PathStops.Of(field, stagnation, reach);
+        Tracer tracer = new(stops);
+        List<(int Saddle, int Order, Complex Launch)> launches = [];
+        for (int i = 0; i < stagnation.Points.Length; i++)
+        {
+            Complex[] of = BranchLaunch.Of(field, stagnation.Points, i);
+            launches.AddRange(of.Select((launch, order) => (i, order, launch)));
+        }
+
+        DividingBranch[] branches = new DividingBranch[launches.Count];
+        workers.For(branches.Length, i =>
+        {
+            cancel.ThrowIfCancellationRequested();
+            BranchRecorder recorder = new(stops, extent);
+            branches[i] = Follow(tracer, launches[i].Saddle, launches[i].Order, launches[i].Launch, recorder);
+        });
+        return new FlowTopology(tracer, [.. branches]);
+    }
+
+    /// <summary>The branch with an order at a saddle; orders wrap round.</summary>
+    /// <param name="saddle">Index of the stagnation point.</param>
+    /// <param name="order">Order of the branch.</param>
+    public DividingBranch BranchAt(int saddle, int order)
+    {
+        int first = 0;
+        for (int i = 0; i < saddle; i++)
+        {
+            first += CountAt(i);
+        }
+
+        return Branches[first + (order + CountAt(saddle)) % CountAt(saddle)];
+    }
+
+    private int CountAt(int saddle) => 2 * (Points[saddle].Multiplicity + 1);
+
+    private static DividingBranch Follow(Tracer tracer, int saddle, int order, Complex launch, BranchRecorder recorder)
+    {
+        PathStops stops = tracer.Stops;
+        bool stable = order % 2 != 0;
+        Sense away = stable ? Sense.Upstream : Sense.Downstream;
+        Sense back = stable ? Sense.Downstream : Sense.Upstream;
+        PathEnd end = tracer.Trace(launch, away, double.PositiveInfinity, recorder, saddle);
+        return new DividingBranch(
+            saddle, order, Closed(stops, saddle, recorder.ToPoints(), end), end, FateBeside(1), FateBeside(-1));
+
+        Fate FateBeside(int side)
+        {
+            Complex companion = BranchLaunch.Companion(
+                stops.Field, stops.Stagnation.Points[saddle].At, launch, stops.TotalRate, side);
+            return tracer.Trace(companion, back, double.PositiveInfinity, null).Fate;
+        }
+    }
+
+    /// <summary>Puts the stagnation point at the front, and the centre of what the branch ends in at the back.</summary>
+    private static ImmutableArray<PathPoint> Closed(
+        PathStops stops, int saddle, ImmutableArray<PathPoint> points, in PathEnd end)
+    {
+        ImmutableArray<StagnationPoint> stagnation = stops.Stagnation.Points;
+        ImmutableArray<PathPoint>.Builder closed = ImmutableArray.CreateBuilder<PathPoint>(points.Length + 2);
+        closed.Add(new PathPoint(stagnation[saddle].At, double.NegativeInfinity));
+        closed.AddRange(points);
+        Fate fate = end.Fate;
+        Complex? centre = fate.Kind switch
+        {
+            FateKind.Well or FateKind.Injection => stops.Field.System.Wells[fate.Feature].At,
+            FateKind.Stagnation => stagnation[fate.Feature].At,
+            _ => null,
+        };
+        if (centre is { } at)
+        {
+            closed.Add(new PathPoint(at, end.Time));
+        }
+
+        return closed.DrainToImmutable();
+    }
+}
