@@ -1,4 +1,12 @@
+using System.Collections.Immutable;
+using CaptureZone.Elements.Wells;
 using CaptureZone.Flow;
+using CaptureZone.Topology;
+using CaptureZone.Tracing;
+using CaptureZone.Zones;
+using CaptureZone.Zones.Plumes;
+using CaptureZone.Zones.TravelTimes;
+using NetTopologySuite.Geometries;
 
 namespace CaptureZone;
 
@@ -30,6 +38,108 @@ public static class SiteAnalysis
     /// <param name="cancel">Stops the work.</param>
     /// <exception cref="DewateredException">A well takes more than the aquifer yields.</exception>
     public static SiteAnswers Run(
-        Model model, Questions questions, IWorkers workers, IProgress<Step>? progress, CancellationToken cancel) =>
-        throw new NotSupportedException();
+        Model model, Questions questions, IWorkers workers, IProgress<Step>? progress, CancellationToken cancel)
+    {
+        FlowField field = FlowSystem.Assemble(model).Solve();
+        ScreenLevels levels = ScreenLevels.Of(field);
+
+        progress?.Report(new Step("stagnation points and dividing streamlines", 0.05));
+        Framing framing = Framing.Of(field, questions);
+        FlowTopology topology = FlowTopology.Find(field, framing.Radius, framing.Extent, workers, cancel);
+
+        progress?.Report(new Step("capture zones", 0.3));
+        FaceMap map = FaceMap.Build(topology, framing.Radius, workers);
+        cancel.ThrowIfCancellationRequested();
+        bool IsContainment(Fate fate) => fate.Kind == FateKind.Well && ServesContainment(topology, fate.Feature);
+        Geometry joint = map.ZoneOf(IsContainment);
+
+        progress?.Report(new Step("travel-time zones", 0.5));
+        WellAnswer[] wells = WellAnswers(topology, map, levels, questions, framing, workers, cancel);
+
+        progress?.Report(new Step("plumes", 0.8));
+        PlumeAnswer[] plumes = new PlumeAnswer[questions.Plumes.Length];
+        workers.For(plumes.Length, i =>
+            plumes[i] = PlumeJudge.Judge(topology, map, joint, i, questions.Plumes[i], IsContainment));
+        cancel.ThrowIfCancellationRequested();
+
+        progress?.Report(new Step("heads and checks", 0.9));
+        KnownHeadInfluence? knownHead = KnownHeadInfluence.Of(levels, field);
+        HeadContourMap contours = HeadContours.Find(field, framing.Extent, questions.HeadUnit);
+        return new SiteAnswers
+        {
+            Field = field,
+            Questions = questions,
+            Extent = framing.Extent,
+            StagnationPoints = topology.Points,
+            StagnationComplete = topology.Complete,
+            Wells = [.. wells],
+            ContainmentZone = joint,
+            Plumes = [.. plumes],
+            Paths = ReportedPaths.Of(topology, questions.Plumes),
+            Contours = contours.Contours,
+            ContourInterval = contours.Interval,
+            Arrows = FlowArrows.Sample(field, framing.Extent, ArrowsAcross),
+            Checks = SelfChecks.Of(topology, map, framing.Extent, wells, plumes, workers),
+            Findings = Findings.Of(topology, levels, framing, questions, wells, plumes, knownHead),
+            KnownHeadDistance = knownHead?.Distance,
+            KnownHeadSensitivity = knownHead?.Sensitivity,
+        };
+    }
+
+    /// <summary>Checks that the aquifer yields what the wells take: what <see cref="Run"/> checks first.</summary>
+    /// <param name="model">The model.</param>
+    /// <exception cref="DewateredException">A well takes more than the aquifer yields.</exception>
+    public static void CheckYield(Model model) => ScreenLevels.Of(FlowSystem.Assemble(model).Solve());
+
+    /// <summary>Flow arrows from one side of the extent to the other.</summary>
+    private const int ArrowsAcross = 18;
+
+    /// <summary>Wells at one place are one sink: it serves containment when one of them does.</summary>
+    private static bool ServesContainment(FlowTopology topology, int well)
+    {
+        Well[] wells = topology.Field.System.Wells;
+        return wells.Any(other => other.At == wells[well].At && other.Purpose == WellPurpose.Containment);
+    }
+
+    private static WellAnswer[] WellAnswers(
+        FlowTopology topology,
+        FaceMap map,
+        ScreenLevels levels,
+        Questions questions,
+        Framing framing,
+        IWorkers workers,
+        CancellationToken cancel)
+    {
+        Geometry extent = GeometryKit.Factory.ToGeometry(framing.Extent);
+        WellAnswer[] answers = new WellAnswer[topology.Field.System.Wells.Length];
+        workers.For(answers.Length, i =>
+        {
+            cancel.ThrowIfCancellationRequested();
+            Well well = topology.Field.System.Wells[i];
+            double rate = topology.Field.Parameters.Rates[i];
+            Screen? screen = rate > 0 ? ScreenOf(topology, well) : null;
+            ImmutableArray<ScreenStretch> stretches = screen is { } sink ? WaterOrigins.Stretches(topology, sink) : [];
+            answers[i] = new WellAnswer(
+                i,
+                levels.Head(i),
+                levels.Drawdown(i),
+                rate > 0 ? levels.LargestRate(i) : null,
+                screen is { } zoned ? WellZones.Of(topology, map, zoned, stretches, extent) : null,
+                screen is { } timed ? TravelTimeZones.Of(topology, timed, stretches, questions.TravelTimes) : []);
+        });
+        return answers;
+    }
+
+    private static Screen? ScreenOf(FlowTopology topology, Well well)
+    {
+        foreach (Screen screen in topology.Stops.Screens)
+        {
+            if (topology.Field.System.Wells[screen.Well].At == well.At && screen.Rate > 0)
+            {
+                return screen;
+            }
+        }
+
+        return null;
+    }
 }

@@ -32,4 +32,9 @@ public abstract record CoordinateSystem
     /// <param name="y">Northing, in the site's unit.</param>
     /// <exception cref="InvalidOperationException">The coordinates are local.</exception>
     public abstract (double Longitude, double Latitude) ToLonLat(double x, double y);
+
+    /// <summary>What is wrong with a place in the site's coordinates, in one line; null when nothing is.</summary>
+    /// <param name="x">Easting, in the site's unit.</param>
+    /// <param name="y">Northing, in the site's unit.</param>
+    public virtual string? ProblemWith(double x, double y) => null;
 }

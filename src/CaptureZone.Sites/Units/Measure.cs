@@ -12,6 +12,19 @@ internal readonly record struct Measure(Exact Factor, int Length, int Time)
     /// <summary>One day.</summary>
     public static Measure Day { get; } = new(Exact.Parse("1"), 0, 1);
 
+    /// <summary>The first dimension that an amount of these powers measures.</summary>
+    /// <exception cref="InvalidOperationException">Nothing in a site file has these powers.</exception>
+    public Dimension Dimension => (Length, Time) switch
+    {
+        (1, 0) => Dimension.Length,
+        (2, 0) => Dimension.Area,
+        (0, 1) => Dimension.Time,
+        (1, -1) => Dimension.Conductivity,
+        (2, -1) => Dimension.Transmissivity,
+        (3, -1) => Dimension.Rate,
+        _ => throw new InvalidOperationException("a unit of the table measures no dimension"),
+    };
+
     /// <summary>Product of two amounts.</summary>
     public static Measure operator *(Measure a, Measure b) => new(a.Factor * b.Factor, a.Length + b.Length, a.Time + b.Time);
 

@@ -5,10 +5,10 @@ namespace CaptureZone.Sites.Units;
 /// <summary>A unit in which a site file may give a quantity.</summary>
 public sealed record Unit
 {
-    internal Unit(string symbol, Dimension dimension, Measure measure, string definition, ImmutableArray<string> alsoWritten)
+    internal Unit(string symbol, Measure measure, string definition, ImmutableArray<string> alsoWritten)
     {
         Symbol = symbol;
-        Dimension = dimension;
+        Dimension = measure.Dimension;
         Measure = measure;
         Factor = measure.Factor.ToDouble();
         Definition = definition;

@@ -1,4 +1,3 @@
-using System.Collections.Frozen;
 using System.Text;
 
 namespace CaptureZone.Sites.Units;
@@ -6,7 +5,7 @@ namespace CaptureZone.Sites.Units;
 /// <summary>One spelling for every way of writing a unit: "feet^2/day", "ft²/d" and "ft2 / d" become "ft2/d".</summary>
 internal static class UnitSpelling
 {
-    private static readonly FrozenDictionary<string, string> Words = new (string Symbol, string[] Words)[]
+    private static readonly Dictionary<string, string> Words = new (string Symbol, string[] Words)[]
     {
         ("m", ["metre", "metres", "meter", "meters"]),
         ("cm", ["centimetre", "centimetres", "centimeter", "centimeters"]),
@@ -26,7 +25,7 @@ internal static class UnitSpelling
         ("h", ["hr", "hrs", "hour", "hours"]),
         ("d", ["day", "days"]),
         ("yr", ["yrs", "year", "years"]),
-    }.SelectMany(entry => entry.Words.Select(word => KeyValuePair.Create(word, entry.Symbol))).ToFrozenDictionary(StringComparer.Ordinal);
+    }.SelectMany(entry => entry.Words.Select(word => KeyValuePair.Create(word, entry.Symbol))).ToDictionary(StringComparer.Ordinal);
 
     /// <summary>The one spelling of a unit's text; a text that is no unit comes out as some text that is none either.</summary>
     /// <param name="text">A unit as a person writes it.</param>

@@ -1,4 +1,3 @@
-using System.Collections.Frozen;
 using System.Globalization;
 
 namespace CaptureZone.Sites.Units;
@@ -8,9 +7,9 @@ namespace CaptureZone.Sites.Units;
 /// </summary>
 public static class UnitTable
 {
-    private static readonly FrozenDictionary<string, Unit> BySpelling = UnitDefinitions.All
+    private static readonly Dictionary<string, Unit> BySpelling = UnitDefinitions.All
         .SelectMany(unit => unit.AlsoWritten.Prepend(unit.Symbol).Select(text => KeyValuePair.Create(UnitSpelling.Of(text), unit)))
-        .ToFrozenDictionary(StringComparer.Ordinal);
+        .ToDictionary(StringComparer.Ordinal);
 
     /// <summary>Every unit that is known.</summary>
     public static IReadOnlyList<Unit> Units => UnitDefinitions.All;

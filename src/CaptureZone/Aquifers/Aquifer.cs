@@ -1,3 +1,5 @@
+using System.Runtime.Intrinsics;
+
 namespace CaptureZone.Aquifers;
 
 /// <summary>
@@ -34,6 +36,28 @@ public sealed record Aquifer(double Conductivity, double Base, double? Top, doub
         potential <= PotentialAtTop
             ? Base + Math.Sqrt(2 * potential / Conductivity)
             : Base + potential / (Conductivity * Thickness) + Thickness / 2;
+
+    /// <summary>Heads of many discharge potentials, m elevation, each with the bits of <see cref="HeadOf"/>.</summary>
+    /// <param name="potentials">Discharge potentials, m3/d.</param>
+    /// <param name="heads">Where they go; may be the same memory.</param>
+    public void HeadsOf(ReadOnlySpan<double> potentials, Span<double> heads)
+    {
+        Vector256<double> conductivity = Vector256.Create(Conductivity), transmissivity = Vector256.Create(Conductivity * Thickness);
+        Vector256<double> top = Vector256.Create(PotentialAtTop), floor = Vector256.Create(Base), half = Vector256.Create(Thickness / 2);
+        int i = 0;
+        for (; i <= potentials.Length - Vector256<double>.Count; i += Vector256<double>.Count)
+        {
+            Vector256<double> potential = Vector256.Create(potentials[i..]);
+            Vector256<double> table = floor + Vector256.Sqrt(2 * potential / conductivity);
+            Vector256<double> confined = floor + potential / transmissivity + half;
+            Vector256.ConditionalSelect(Vector256.LessThanOrEqual(potential, top), table, confined).CopyTo(heads[i..]);
+        }
+
+        for (; i < potentials.Length; i++)
+        {
+            heads[i] = HeadOf(potentials[i]);
+        }
+    }
 
     /// <summary>Saturated thickness, m; 0 where the potential is zero or negative.</summary>
     /// <param name="potential">Discharge potential, m3/d.</param>

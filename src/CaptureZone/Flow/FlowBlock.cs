@@ -23,6 +23,31 @@ public readonly ref struct FlowBlock
     /// <summary>dQy/dy, m/d. Qxx + Qyy is the recharge, m/d.</summary>
     public Span<double> Qyy { get; init; }
 
+    /// <summary>Adds the flow at one point.</summary>
+    /// <param name="i">Index of the point.</param>
+    /// <param name="ask">What is wanted of it.</param>
+    /// <param name="flow">The flow there.</param>
+    public void Add(int i, Ask ask, in PointFlow flow)
+    {
+        if ((ask & Ask.Potential) != 0)
+        {
+            Potential[i] += flow.Potential;
+        }
+
+        if ((ask & Ask.Discharge) != 0)
+        {
+            Qx[i] += flow.Qx;
+            Qy[i] += flow.Qy;
+        }
+
+        if ((ask & Ask.Gradient) != 0)
+        {
+            Qxx[i] += flow.Qxx;
+            Qxy[i] += flow.Qxy;
+            Qyy[i] += flow.Qyy;
+        }
+    }
+
     /// <summary>A part of the block, for points that are a part of the points.</summary>
     /// <param name="ask">Which spans are there.</param>
     /// <param name="start">First index.</param>

@@ -12,6 +12,9 @@ public interface IBank
     /// <summary>How many strengths it takes.</summary>
     int Columns { get; }
 
+    /// <summary>What of the flow it adds to; it is not asked for the rest alone.</summary>
+    Ask Gives => Ask.Potential | Ask.Discharge | Ask.Gradient;
+
     /// <summary>Adds what the bank contributes at points.</summary>
     /// <param name="at">The points.</param>
     /// <param name="side">Which limit, for points on one of the bank's lines.</param>
@@ -19,6 +22,31 @@ public interface IBank
     /// <param name="strength">One value per column, in the bank's own unit.</param>
     /// <param name="into">Where it is added.</param>
     void Add(Points at, Side side, Ask ask, ReadOnlySpan<double> strength, in FlowBlock into);
+
+    /// <summary>
+    /// Adds what the bank contributes at one point, with the bits of <see cref="Add"/>. Paths are traced through this, a point at
+    /// a time: a bank that can do it without a detour through blocks should.
+    /// </summary>
+    /// <param name="x">Easting, m.</param>
+    /// <param name="y">Northing, m.</param>
+    /// <param name="side">Which limit, for a point on one of the bank's lines.</param>
+    /// <param name="ask">What is wanted.</param>
+    /// <param name="strength">One value per column, in the bank's own unit.</param>
+    /// <param name="into">Where it is added.</param>
+    void AddAt(double x, double y, Side side, Ask ask, ReadOnlySpan<double> strength, ref PointFlow into) => Add(
+        new Points(new(in x), new(in y)),
+        side,
+        ask,
+        strength,
+        new FlowBlock
+        {
+            Potential = new(ref into.Potential),
+            Qx = new(ref into.Qx),
+            Qy = new(ref into.Qy),
+            Qxx = new(ref into.Qxx),
+            Qxy = new(ref into.Qxy),
+            Qyy = new(ref into.Qyy),
+        });
 
     /// <summary>
     /// What each column contributes at each point for a strength of one. For <see cref="Ask.Potential"/> one row a point; for

@@ -8,13 +8,13 @@ namespace CaptureZone.Topology;
 /// </summary>
 internal readonly struct FarFlow
 {
-    /// <summary>Zeros beyond this many site diameters count as at infinity.</summary>
-    internal const double FarDiameters = 1e6;
+    /// <summary>Zeros beyond this many site diameters from the middle count as at infinity.</summary>
+    private const double FarDiameters = 1e6;
 
     /// <summary>A site counts as at least this wide, m: the limit is then farther than round the Earth.</summary>
-    internal const double SmallestSite = 100;
+    private const double SmallestSite = 100;
 
-    /// <summary>The edge itself may be crossed by no zero that is left out: the term must lead up to this many times as far.</summary>
+    /// <summary>Zeros up to this many times as far are found all the same, so that those left out do not bend the others.</summary>
     private const double Clearance = 4;
 
     /// <summary>Middle of the sinks' bounding box, m.</summary>
@@ -23,10 +23,13 @@ internal readonly struct FarFlow
     /// <summary>Radius of a circle about <see cref="Centre"/> that holds every sink, m.</summary>
     internal double Radius { get; private init; }
 
-    /// <summary>How many zeros of the polynomial of degree <see cref="RationalFlow.Count"/> are at infinity.</summary>
-    internal int AtInfinity { get; private init; }
+    /// <summary>Zeros farther from <see cref="Centre"/> than this count as at infinity, m.</summary>
+    internal double Edge { get; private init; }
 
-    /// <summary>Coefficient of the term that leads: W is about this over (z - c)^<see cref="AtInfinity"/>.</summary>
+    /// <summary>How many zeros of the polynomial of degree <see cref="RationalFlow.Count"/> need no finding: they are that far.</summary>
+    internal int Beyond { get; private init; }
+
+    /// <summary>Coefficient of the term that leads: W is about this over (z - c)^<see cref="Beyond"/>.</summary>
     internal Complex Leading { get; private init; }
 
     /// <summary>Coefficient of the term after it.</summary>
@@ -35,7 +38,7 @@ internal readonly struct FarFlow
     internal static FarFlow Of(RationalFlow flow)
     {
         (Complex centre, double radius, double diameter) = Site(flow);
-        double reach = Clearance * FarDiameters * Math.Max(diameter, SmallestSite) / radius;
+        double edge = FarDiameters * Math.Max(diameter, SmallestSite), reach = Clearance * edge / radius;
         double strength = 0;
         for (int j = 0; j < flow.Count; j++)
         {
@@ -77,7 +80,8 @@ internal readonly struct FarFlow
         {
             Centre = centre,
             Radius = radius,
-            AtInfinity = leads,
+            Edge = edge,
+            Beyond = leads,
             Leading = leading * unit,
             Next = next * unit * radius,
         };

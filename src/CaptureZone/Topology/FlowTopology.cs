@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Numerics;
 using CaptureZone.Flow;
 using CaptureZone.Tracing;
+using NetTopologySuite.Geometries;
 
 namespace CaptureZone.Topology;
 
@@ -11,12 +12,6 @@ namespace CaptureZone.Topology;
 /// </summary>
 public sealed class FlowTopology
 {
-    /// <summary>Largest change of direction from vertex to vertex of a dividing streamline, radians.</summary>
-    private const double Turn = 0.05;
-
-    /// <summary>Largest flow that a chord of a dividing streamline cuts off, as a share of the total rate.</summary>
-    private const double LeakShare = 2e-8;
-
     private FlowTopology(Tracer tracer, ImmutableArray<DividingBranch> branches)
     {
         Tracer = tracer;
@@ -44,9 +39,11 @@ public sealed class FlowTopology
     /// <summary>Finds the topology of a field.</summary>
     /// <param name="field">The field.</param>
     /// <param name="reach">Radius about the site's centre that must lie well inside the circle at which paths end, m.</param>
+    /// <param name="extent">Where the vertices of dividing streamlines are wanted close together, m.</param>
     /// <param name="workers">Who does the work.</param>
     /// <param name="cancel">Stops the work.</param>
-    public static FlowTopology Find(FlowField field, double reach, IWorkers workers, CancellationToken cancel)
+    public static FlowTopology Find(
+        FlowField field, double reach, Envelope extent, IWorkers workers, CancellationToken cancel)
     {
         StagnationSet stagnation = StagnationFinder.Find(field);
         PathStops stops = PathStops.Of(field, stagnation, reach);
@@ -62,7 +59,8 @@ public sealed class FlowTopology
         workers.For(branches.Length, i =>
         {
             cancel.ThrowIfCancellationRequested();
-            branches[i] = Follow(tracer, launches[i].Saddle, launches[i].Order, launches[i].Launch);
+            BranchRecorder recorder = new(stops, extent);
+            branches[i] = Follow(tracer, launches[i].Saddle, launches[i].Order, launches[i].Launch, recorder);
         });
         return new FlowTopology(tracer, [.. branches]);
     }
@@ -83,11 +81,10 @@ public sealed class FlowTopology
 
     private int CountAt(int saddle) => 2 * (Points[saddle].Multiplicity + 1);
 
-    private static DividingBranch Follow(Tracer tracer, int saddle, int order, Complex launch)
+    private static DividingBranch Follow(Tracer tracer, int saddle, int order, Complex launch, BranchRecorder recorder)
     {
         PathStops stops = tracer.Stops;
         bool stable = order % 2 != 0;
-        PathRecorder recorder = new(new PathResolution(Turn, LeakShare * stops.TotalRate));
         Sense away = stable ? Sense.Upstream : Sense.Downstream;
         Sense back = stable ? Sense.Downstream : Sense.Upstream;
         PathEnd end = tracer.Trace(launch, away, double.PositiveInfinity, recorder, saddle);

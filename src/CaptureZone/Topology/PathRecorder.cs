@@ -11,7 +11,7 @@ internal sealed class PathRecorder(PathResolution resolution) : IPathSink
     private readonly ImmutableArray<PathPoint>.Builder _points = ImmutableArray.CreateBuilder<PathPoint>();
 
     /// <inheritdoc/>
-    public PathResolution Resolution { get; } = resolution;
+    public PathResolution ResolutionAt(Complex at) => resolution;
 
     /// <inheritdoc/>
     public void Add(Complex at, double time) => _points.Add(new PathPoint(at, time));

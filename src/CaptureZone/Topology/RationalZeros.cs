@@ -17,8 +17,8 @@ public readonly record struct RationalZero(int Sink, Complex Offset, Complex At,
 /// <param name="Zeros">The zeros, in no particular order.</param>
 /// <param name="Expected">How many there are by the degree, counted with multiplicity, those at infinity left out.</param>
 /// <param name="AtInfinity">
-/// How many are at infinity: a zero is when the leading moments vanish up to rounding, or when it is farther than 1e6 diameters
-/// of the site, the site being at least 100 m wide.
+/// How many are at infinity: because leading moments vanish up to rounding, or farther from the middle of the sinks' bounding box
+/// than 1e6 diameters of the circle about it that holds all sinks, taken as at least 100 m.
 /// </param>
 /// <param name="Complete">Whether each zero has a disc of its own that holds it, so that none is missing.</param>
 /// <param name="Rounds">Rounds of the iteration.</param>
@@ -34,17 +34,33 @@ public sealed record RationalZeros(ImmutableArray<RationalZero> Zeros, int Expec
         }
 
         FarFlow far = FarFlow.Of(flow);
-        int expected = flow.Count - far.AtInfinity;
-        Span<NearSink> zeros = stackalloc NearSink[expected];
-        Span<double> radius = stackalloc double[expected];
-        Span<int> first = stackalloc int[expected];
+        int count = flow.Count - far.Beyond;
+        Span<NearSink> zeros = stackalloc NearSink[count];
+        Span<double> radius = stackalloc double[count];
+        Span<int> first = stackalloc int[count];
         StartingPoints.Write(flow, far, zeros);
         int rounds = SimultaneousIteration.Run(flow, zeros);
         InclusionDiscs.Write(flow, far, zeros, radius);
         InclusionDiscs.Group(flow, zeros, radius, first);
         ImmutableArray<RationalZero> found = Gather(flow, zeros, radius, first, out bool complete);
-        return new RationalZeros(found, expected, far.AtInfinity, complete, rounds);
+        int tooFar = CountBeyond(far.Edge, far.Centre, found);
+        return new RationalZeros(
+            tooFar == 0 ? found : Within(far.Edge, far.Centre, found), count - tooFar, far.Beyond + tooFar, complete, rounds);
     }
+
+    private static int CountBeyond(double edge, Complex centre, ImmutableArray<RationalZero> zeros)
+    {
+        int count = 0;
+        foreach (RationalZero zero in zeros)
+        {
+            count += Complex.Abs(zero.At - centre) > edge ? zero.Multiplicity : 0;
+        }
+
+        return count;
+    }
+
+    private static ImmutableArray<RationalZero> Within(double edge, Complex centre, ImmutableArray<RationalZero> zeros) =>
+        zeros.RemoveAll(zero => Complex.Abs(zero.At - centre) > edge);
 
     private static ImmutableArray<RationalZero> Gather(
         RationalFlow flow, Span<NearSink> zeros, Span<double> radius, Span<int> first, out bool complete)

@@ -15,6 +15,9 @@ internal static class SimultaneousIteration
     /// <summary>Most rounds. A double zero takes about 20; zeros of high order stop earlier, as they are less distinct.</summary>
     private const int MostRounds = 300;
 
+    /// <summary>Where the step has no direction, the approximation steps aside by this share of its offset from the sink.</summary>
+    private static readonly Complex s_aside = new(0.1, 0.1);
+
     /// <summary>Moves the approximations onto the zeros; gives the rounds that it took.</summary>
     internal static int Run(RationalFlow flow, Span<NearSink> zeros)
     {
@@ -52,11 +55,13 @@ internal static class SimultaneousIteration
 
         Complex push = Push(flow, zeros, i, out double distance);
         Complex move = -Divide(near.Value, near.Slope + near.Value * (near.OtherPoles - push));
+        move = double.IsFinite(move.Real + move.Imaginary) ? move : s_aside * zeros[i].Offset;
         zeros[i] = zeros[i].Moved(move);
         return Size(move) <= LastMove * Math.Min(distance, zeros[i].Distance);
     }
 
-    /// <summary>Sum of 1 / (z_i - z_k) over the other approximations, which keeps them apart; and the distance to the nearest.</summary>
+    /// <summary>Sum of 1 / (z_i - z_k) over the other approximations, which keeps them apart; and the distance to the nearest. Two
+    /// at one place do not push: one moves first, and they are apart.</summary>
     private static Complex Push(RationalFlow flow, ReadOnlySpan<NearSink> zeros, int i, out double distance)
     {
         NearSink at = zeros[i];
@@ -74,9 +79,13 @@ internal static class SimultaneousIteration
             double dx = at.X - other.X + (place.Real - otherPlace.Real);
             double dy = at.Y - other.Y + (place.Imaginary - otherPlace.Imaginary);
             double square = dx * dx + dy * dy;
-            x += dx / square;
-            y -= dy / square;
             nearest = Math.Min(nearest, square);
+            if (square > 0)
+            {
+                double inverse = 1 / square;
+                x += dx * inverse;
+                y -= dy * inverse;
+            }
         }
 
         distance = Math.Sqrt(nearest);

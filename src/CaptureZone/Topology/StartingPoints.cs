@@ -14,8 +14,11 @@ internal static class StartingPoints
     /// <summary>A zero this many site radii out is far.</summary>
     private const double FarRadii = 2;
 
-    /// <summary>Turns starts that were cut short, so that symmetric wells do not give symmetric starts, which can stay symmetric.</summary>
-    private static readonly Complex s_turn = Complex.FromPolarCoordinates(1, 0.4);
+    /// <summary>
+    /// A start is turned by this angle, rad, times its doubt: wells along the flow would else give starts along the flow, which
+    /// never leave it for zeros that lie to both sides.
+    /// </summary>
+    private const double Turn = 0.4;
 
     /// <summary>Writes as many starts as there are zeros.</summary>
     internal static void Write(RationalFlow flow, FarFlow far, Span<NearSink> into)
@@ -53,15 +56,20 @@ internal static class StartingPoints
             }
         }
 
+        double limit = Share * Math.Sqrt(nearest);
         Complex offset = flow.Strength(sink) / others;
-        double limit = Share * Math.Sqrt(nearest), length = Complex.Abs(offset);
-        doubt = length / limit;
-        if (!(doubt <= 1))
+        doubt = Complex.Abs(offset) / limit;
+        if (!double.IsFinite(doubt))
         {
-            offset = double.IsFinite(length) ? offset * (s_turn / doubt) : s_turn * limit;
+            doubt = double.PositiveInfinity;
+            offset = limit;
+        }
+        else if (doubt > 1)
+        {
+            offset /= doubt;
         }
 
-        return new NearSink(sink, offset.Real, offset.Imaginary);
+        return new NearSink(sink, 0, 0).Moved(offset * new Complex(1, Turn * Math.Min(doubt, 1)));
     }
 
     private static void DropDoubtful(Span<NearSink> starts, Span<double> doubt, int keep)
@@ -71,7 +79,7 @@ internal static class StartingPoints
             int worst = 0;
             for (int j = 1; j < count; j++)
             {
-                if (!(doubt[j] <= doubt[worst]))
+                if (doubt[j] > doubt[worst])
                 {
                     worst = j;
                 }

@@ -14,8 +14,8 @@ public static class Winding
     /// <summary>Samples to begin with.</summary>
     private const int FirstSamples = 64;
 
-    /// <summary>Halvings of an arc at most: one that needs more passes through a stagnation point or a well.</summary>
-    private const int MostHalvings = 40;
+    /// <summary>Halvings of an arc at most: one that needs more all but passes through a stagnation point or a well.</summary>
+    private const int MostHalvings = 12;
 
     /// <summary>The index round a circle.</summary>
     /// <param name="discharge">Discharge vector Qx + i Qy at a place.</param>
@@ -36,7 +36,7 @@ public static class Winding
     private static double Turn(Func<double, Complex> on, double a, Complex atA, double b, Complex atB, int halvings)
     {
         double turn = (atB * Complex.Conjugate(atA)).Phase;
-        if (Math.Abs(turn) <= LargestTurn || halvings == 0)
+        if (!(Math.Abs(turn) > LargestTurn) || halvings == 0)
         {
             return turn;
         }

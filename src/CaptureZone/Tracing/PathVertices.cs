@@ -54,7 +54,8 @@ internal readonly struct PathVertices(FlowField field, double sign, IPathSink? s
             step * (Complex.Abs(bendFrom) + Complex.Abs(bendTo)) / 2,
             Complex.Abs(to.Direction - from.Direction));
         double leak = Math.Max(from.Speed, to.Speed) * step * turn / 8;
-        double parts = Math.Max(turn / _sink!.Resolution.Turn, Math.Sqrt(leak / _sink.Resolution.Leak));
+        PathResolution resolution = _sink!.ResolutionAt(from.At);
+        double parts = Math.Max(turn / resolution.Turn, Math.Sqrt(leak / resolution.Leak));
         return (int)Math.Clamp(Math.Ceiling(parts), 1, MostPerStep);
     }
 

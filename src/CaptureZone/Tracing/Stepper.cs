@@ -10,7 +10,7 @@ namespace CaptureZone.Tracing;
 internal readonly struct Stepper(FlowField field, double sign)
 {
     /// <summary>Error allowed in a step, as a share of the distance to the nearest singular place (position) or of the time.</summary>
-    private const double Tolerance = 1e-10;
+    private const double Tolerance = 1e-8;
 
     /// <summary>Weight of the error estimate of order 3 against that of order 5 (Hairer, Norsett and Wanner 1993, section II.10).</summary>
     private const double LowOrderWeight = 0.01;

@@ -17,8 +17,9 @@ public enum Sense
 /// <summary>Takes the vertices of a path while it is followed.</summary>
 public interface IPathSink
 {
-    /// <summary>How finely it wants them.</summary>
-    PathResolution Resolution { get; }
+    /// <summary>How finely it wants them at a place.</summary>
+    /// <param name="at">The place, m.</param>
+    PathResolution ResolutionAt(Complex at);
 
     /// <summary>Takes the next vertex.</summary>
     /// <param name="at">Where, m.</param>

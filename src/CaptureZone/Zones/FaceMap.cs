@@ -4,6 +4,7 @@ using CaptureZone.Flow;
 using CaptureZone.Topology;
 using CaptureZone.Tracing;
 using NetTopologySuite.Geometries;
+using NetTopologySuite.Operation.OverlayNG;
 using NetTopologySuite.Operation.Polygonize;
 using NetTopologySuite.Operation.Union;
 
@@ -19,7 +20,9 @@ public sealed record Face(Polygon Polygon, Fate Origin, Fate Destination);
 /// <param name="Centre">Centre of the circle, m.</param>
 /// <param name="Radius">Its radius, m.</param>
 /// <param name="Faces">The faces.</param>
-public sealed record FaceMap(Complex Centre, double Radius, ImmutableArray<Face> Faces)
+/// <param name="Zones">For each destination, the union of the faces whose water goes there.</param>
+public sealed record FaceMap(
+    Complex Centre, double Radius, ImmutableArray<Face> Faces, ImmutableDictionary<Fate, Geometry> Zones)
 {
     /// <summary>Straight pieces of the circle.</summary>
     private const int CirclePieces = 720;
@@ -54,15 +57,28 @@ public sealed record FaceMap(Complex Centre, double Radius, ImmutableArray<Face>
         ];
         Face?[] faces = new Face?[polygons.Length];
         workers.For(polygons.Length, i => faces[i] = FaceOf(topology, polygons[i], centre, radius));
-        return new FaceMap(centre, radius, [.. faces.OfType<Face>()]);
+        ImmutableArray<Face> known = [.. faces.OfType<Face>()];
+        return new FaceMap(centre, radius, known, ZonesOf(known, SliverShare * disc.Area));
     }
 
-    /// <summary>The union of the faces whose water goes to one of some destinations.</summary>
-    /// <param name="chosen">Tells whether a destination is one of them.</param>
-    public Geometry ZoneOf(Func<Fate, bool> chosen)
+    /// <summary>The zone from which water goes to a destination; empty where none does.</summary>
+    /// <param name="destination">The destination.</param>
+    public Geometry ZoneOf(Fate destination) => Zones.GetValueOrDefault(destination) ?? GeometryKit.Factory.CreatePolygon();
+
+    /// <summary>The zone from which water goes to one of some destinations.</summary>
+    /// <param name="isChosen">Tells whether a destination is one of them.</param>
+    public Geometry ZoneOf(Func<Fate, bool> isChosen) => UnionOf(Faces.Where(face => isChosen(face.Destination)), 0);
+
+    private static ImmutableDictionary<Fate, Geometry> ZonesOf(ImmutableArray<Face> faces, double smallest) =>
+        faces.GroupBy(face => face.Destination).ToImmutableDictionary(group => group.Key, group => UnionOf(group, smallest));
+
+    /// <summary>Faces meet in the same vertices all along their common edges: their union only drops these edges.</summary>
+    private static Geometry UnionOf(IEnumerable<Face> faces, double smallest)
     {
-        Geometry[] parts = [.. Faces.Where(face => chosen(face.Destination)).Select(face => face.Polygon)];
-        return GeometryKit.Areas(GeometryKit.Union(parts), SliverShare * Math.PI * Radius * Radius);
+        Geometry[] parts = [.. faces.Select(face => face.Polygon)];
+        return parts.Length == 0
+            ? GeometryKit.Factory.CreatePolygon()
+            : GeometryKit.Areas(CoverageUnion.Union(GeometryKit.Factory.BuildGeometry(parts)), smallest);
     }
 
     private static LineString LineOf(DividingBranch branch) =>

@@ -46,10 +46,6 @@ internal static class GeometryKit
     internal static Geometry Difference(Geometry a, Geometry b) =>
         Areas(OverlayNGRobust.Overlay(a, b, NetTopologySuite.Operation.Overlay.SpatialFunction.Difference));
 
-    /// <summary>All areas together; an empty polygon for none.</summary>
-    internal static Geometry Union(IReadOnlyCollection<Geometry> areas) =>
-        areas.Count == 0 ? Factory.CreatePolygon() : Areas(OverlayNGRobust.Union(areas));
-
     /// <summary>Polygons only, without parts and holes below a size.</summary>
     /// <param name="geometry">Any geometry.</param>
     /// <param name="smallest">The size, m2.</param>

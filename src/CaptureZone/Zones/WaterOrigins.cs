@@ -70,7 +70,12 @@ internal static class WaterOrigins
 
     private static double AngleAt(Screen screen, DividingBranch branch) => (branch.End.At - screen.At).Phase;
 
-    private static double Inflow(FlowField field, Screen screen, double from, double to)
+    /// <summary>What enters a screen between two angles, m3/d.</summary>
+    /// <param name="field">The field.</param>
+    /// <param name="screen">The screen.</param>
+    /// <param name="from">Where the part begins, radians counter-clockwise from east.</param>
+    /// <param name="to">Where it ends; not below <paramref name="from"/>.</param>
+    internal static double Inflow(FlowField field, Screen screen, double from, double to)
     {
         int pieces = Math.Max(1, (int)Math.Ceiling(PiecesPerTurn * (to - from) / (2 * Math.PI)));
         double inflow = 0;

@@ -20,7 +20,7 @@ public sealed record SourceShare(Fate Source, double Rate, double Share);
 /// <param name="WidthUpgradient">The limit of its width far upstream, m: regional water over Q0; null without regional flow.</param>
 /// <param name="StagnationDistance">From the well to the nearest saddle on the zone's edge, m; null where there is none.</param>
 /// <param name="WaterFrom">Where the water comes from, largest first.</param>
-/// <param name="SideFlow">What leaks through the streamline edges, of the well's rate.</param>
+/// <param name="SideFlow">What leaks through the streamline edges within the extent, of the well's rate: the integral of |normal discharge|.</param>
 public sealed record WellZone(
     Geometry Polygon,
     Geometry InExtent,

@@ -22,11 +22,11 @@ internal static class WellZones
     internal static WellZone Of(
         FlowTopology topology, FaceMap map, Screen screen, ImmutableArray<ScreenStretch> stretches, Geometry extent)
     {
-        Geometry polygon = map.ZoneOf(fate => fate == new Fate(FateKind.Well, screen.Well));
+        Geometry polygon = map.ZoneOf(new Fate(FateKind.Well, screen.Well));
         Geometry inExtent = GeometryKit.Intersection(polygon, extent);
         Geometry edges = ZoneEdges.Of(polygon, map);
         ImmutableArray<SourceShare> shares = WaterOrigins.Shares(stretches);
-        bool open = shares.Any(share => share.Source.Kind == FateKind.Far);
+        bool open = shares.Any(share => share.Source.Kind == FateKind.Far) || ZoneEdges.TouchFrame(polygon, map);
         double uniform = Complex.Abs(topology.Field.UniformDischarge);
         double fromFar = shares.Where(share => share.Source.Kind == FateKind.Far).Sum(share => share.Rate);
         return new WellZone(
@@ -39,7 +39,7 @@ internal static class WellZones
             uniform > 0 ? fromFar / uniform : null,
             StagnationDistance(topology, screen.At, edges, map),
             shares,
-            ZoneEdges.Leak(edges, topology.Field, at => IsInScreen(topology.Stops, at)) / screen.Rate);
+            ZoneEdges.Leak(edges.Intersection(extent), topology.Field, at => IsInScreen(topology.Stops, at)) / screen.Rate);
     }
 
     /// <summary>Extent of a zone on the line through the well across the regional flow, from outermost edge to outermost edge.</summary>

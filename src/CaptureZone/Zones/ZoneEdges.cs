@@ -36,6 +36,11 @@ internal static class ZoneEdges
         return GeometryKit.Factory.CreateMultiLineString([.. lines]);
     }
 
+    /// <summary>Whether a zone reaches the circle that frames it: every closed zone lies well within.</summary>
+    /// <param name="zone">The zone.</param>
+    /// <param name="map">The circle.</param>
+    internal static bool TouchFrame(Geometry zone, FaceMap map) => zone.Coordinates.Any(corner => IsOnFrame(corner, map));
+
     /// <summary>The integral of |normal discharge| along edges, m3/d: what leaks through a polygon that should be tight.</summary>
     /// <param name="edges">The edges.</param>
     /// <param name="field">The field.</param>

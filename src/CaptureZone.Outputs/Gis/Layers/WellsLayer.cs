@@ -1,7 +1,7 @@
-using CaptureZone.Zones;
 using System.Collections.Immutable;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Outputs.Text;
+using CaptureZone.Zones;
 
 namespace CaptureZone.Outputs.Gis.Layers;
 

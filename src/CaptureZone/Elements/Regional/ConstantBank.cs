@@ -10,9 +10,12 @@ public sealed class ConstantBank : IBank
     public int Columns => 1;
 
     /// <inheritdoc/>
+    public Ask Gives => Ask.Potential;
+
+    /// <inheritdoc/>
     public void Add(Points at, Side side, Ask ask, ReadOnlySpan<double> strength, in FlowBlock into)
     {
-        if (!ask.HasFlag(Ask.Potential))
+        if ((ask & Ask.Potential) == 0)
         {
             return;
         }
@@ -22,6 +25,15 @@ public sealed class ConstantBank : IBank
         for (int i = 0; i < at.Count; i++)
         {
             potential[i] += constant;
+        }
+    }
+
+    /// <inheritdoc/>
+    public void AddAt(double x, double y, Side side, Ask ask, ReadOnlySpan<double> strength, ref PointFlow into)
+    {
+        if ((ask & Ask.Potential) != 0)
+        {
+            into.Potential += strength[0];
         }
     }
 

@@ -13,21 +13,43 @@ public sealed class UniformBank(Complex origin) : IBank
     public int Columns => 2;
 
     /// <inheritdoc/>
+    public Ask Gives => Ask.Potential | Ask.Discharge;
+
+    /// <inheritdoc/>
     public void Add(Points at, Side side, Ask ask, ReadOnlySpan<double> strength, in FlowBlock into)
     {
         double qx = strength[0], qy = strength[1];
-        for (int i = 0; i < at.Count; i++)
+        if ((ask & Ask.Potential) != 0)
         {
-            if (ask.HasFlag(Ask.Potential))
+            for (int i = 0; i < at.Count; i++)
             {
                 into.Potential[i] -= qx * (at.X[i] - origin.Real) + qy * (at.Y[i] - origin.Imaginary);
             }
+        }
 
-            if (ask.HasFlag(Ask.Discharge))
+        if ((ask & Ask.Discharge) != 0)
+        {
+            for (int i = 0; i < at.Count; i++)
             {
                 into.Qx[i] += qx;
                 into.Qy[i] += qy;
             }
+        }
+    }
+
+    /// <inheritdoc/>
+    public void AddAt(double x, double y, Side side, Ask ask, ReadOnlySpan<double> strength, ref PointFlow into)
+    {
+        double qx = strength[0], qy = strength[1];
+        if ((ask & Ask.Potential) != 0)
+        {
+            into.Potential -= qx * (x - origin.Real) + qy * (y - origin.Imaginary);
+        }
+
+        if ((ask & Ask.Discharge) != 0)
+        {
+            into.Qx += qx;
+            into.Qy += qy;
         }
     }
 

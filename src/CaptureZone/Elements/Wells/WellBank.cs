@@ -1,14 +1,23 @@
 using System.Numerics;
+using System.Runtime.Intrinsics;
 using CaptureZone.Flow;
 
 namespace CaptureZone.Elements.Wells;
 
 /// <summary>
 /// Wells: Omega = (q / 2 pi) ln(z - zw), W = -(q / 2 pi) / (z - zw) (Thiem, 1906; O.D.L. Strack, <i>Groundwater Mechanics</i>, 1989).
-/// Strength: the rate q of each well, m3/d, positive for extraction.
+/// Strength: the rate q of each well, m3/d, positive for extraction. On its own axis a well has the potential -infinity when it
+/// extracts and +infinity when it injects, and adds nothing to the discharge and its derivatives (their mean over any circle
+/// round the axis). A well of strength zero adds nothing anywhere.
 /// </summary>
 public sealed class WellBank : IBank
 {
+    /// <summary>
+    /// Both coordinates of the wells of strength zero that fill the last lanes, m: so far that they are never the nearest, and
+    /// near enough for the square of their distance to stay finite.
+    /// </summary>
+    private const double Nowhere = 1e150;
+
     private readonly double[] _x;
     private readonly double[] _y;
 
@@ -16,53 +25,39 @@ public sealed class WellBank : IBank
     /// <param name="wells">The wells, in the order of the strengths.</param>
     public WellBank(IReadOnlyList<Well> wells)
     {
-        _x = [.. wells.Select(well => well.At.Real)];
-        _y = [.. wells.Select(well => well.At.Imaginary)];
+        Columns = wells.Count;
+        _x = InLanes(wells, well => well.At.Real);
+        _y = InLanes(wells, well => well.At.Imaginary);
     }
 
     /// <inheritdoc/>
-    public int Columns => _x.Length;
+    public int Columns { get; }
+
+    private WellPlaces Places => new(_x, _y);
 
     /// <inheritdoc/>
     public void Add(Points at, Side side, Ask ask, ReadOnlySpan<double> strength, in FlowBlock into)
     {
-        for (int i = 0; i < at.Count; i++)
+        int together = Vector256.IsHardwareAccelerated ? at.Count & ~(WellPlaces.Lanes - 1) : 0;
+        WellsAtFourPoints.Add(Places, at, together, ask, strength, into);
+        for (int i = together; i < at.Count; i++)
         {
-            double potential = 0, qx = 0, qy = 0, qxx = 0, qxy = 0;
-            for (int j = 0; j < _x.Length; j++)
-            {
-                double dx = at.X[i] - _x[j], dy = at.Y[i] - _y[j];
-                double r2 = dx * dx + dy * dy;
-                double s = strength[j] / (2 * Math.PI);
-                double c = s / r2;
-                if (ask.HasFlag(Ask.Potential))
-                {
-                    potential += s * 0.5 * Math.Log(r2);
-                }
+            PointFlow flow = default;
+            AddAt(at.X[i], at.Y[i], side, ask, strength, ref flow);
+            into.Add(i, ask, flow);
+        }
+    }
 
-                qx -= c * dx;
-                qy -= c * dy;
-                qxx += c * (dx * dx - dy * dy) / r2;
-                qxy += c * 2 * dx * dy / r2;
-            }
-
-            if (ask.HasFlag(Ask.Potential))
-            {
-                into.Potential[i] += potential;
-            }
-
-            if (ask.HasFlag(Ask.Discharge))
-            {
-                into.Qx[i] += qx;
-                into.Qy[i] += qy;
-            }
-
-            if (ask.HasFlag(Ask.Gradient))
-            {
-                into.Qxx[i] += qxx;
-                into.Qxy[i] += qxy;
-                into.Qyy[i] -= qxx;
-            }
+    /// <inheritdoc/>
+    public void AddAt(double x, double y, Side side, Ask ask, ReadOnlySpan<double> strength, ref PointFlow into)
+    {
+        if (Vector256.IsHardwareAccelerated)
+        {
+            WellsAtOnePoint.Add(Places, x, y, ask, strength, ref into);
+        }
+        else
+        {
+            ScalarWells.Add(Places, x, y, ask, strength, ref into);
         }
     }
 
@@ -75,19 +70,20 @@ public sealed class WellBank : IBank
             int potential = ask.HasFlag(Ask.Potential) ? row++ : -1;
             int qx = ask.HasFlag(Ask.Discharge) ? row++ : -1;
             int qy = ask.HasFlag(Ask.Discharge) ? row++ : -1;
-            for (int j = 0; j < _x.Length; j++)
+            for (int j = 0; j < Columns; j++)
             {
                 double dx = at.X[i] - _x[j], dy = at.Y[i] - _y[j];
                 double r2 = dx * dx + dy * dy;
                 if (potential >= 0)
                 {
-                    rows[potential * stride + j] = Math.Log(r2) / (4 * Math.PI);
+                    rows[potential * stride + j] = Math.Log(r2) * WellPlaces.OneOverFourPi;
                 }
 
                 if (qx >= 0)
                 {
-                    rows[qx * stride + j] = -dx / (2 * Math.PI * r2);
-                    rows[qy * stride + j] = -dy / (2 * Math.PI * r2);
+                    double reciprocal = 1 / Math.Max(r2, WellPlaces.OnAxis);
+                    rows[qx * stride + j] = -dx * reciprocal * WellPlaces.OneOverTwoPi;
+                    rows[qy * stride + j] = -dy * reciprocal * WellPlaces.OneOverTwoPi;
                 }
             }
         }
@@ -97,27 +93,30 @@ public sealed class WellBank : IBank
     public double FluxAcross(Complex a, Complex b, ReadOnlySpan<double> strength)
     {
         double flux = 0;
-        for (int j = 0; j < _x.Length; j++)
+        for (int j = 0; j < strength.Length; j++)
         {
             double ax = a.Real - _x[j], ay = a.Imaginary - _y[j];
             double bx = b.Real - _x[j], by = b.Imaginary - _y[j];
             flux -= strength[j] * Math.Atan2(ax * by - ay * bx, ax * bx + ay * by);
         }
 
-        return flux / (2 * Math.PI);
+        return flux * WellPlaces.OneOverTwoPi;
     }
 
     /// <inheritdoc/>
     public double GradientBound(Complex centre, double radius, ReadOnlySpan<double> strength)
     {
         double bound = 0;
-        for (int j = 0; j < _x.Length; j++)
+        for (int j = 0; j < strength.Length; j++)
         {
-            double near = Complex.Abs(centre - new Complex(_x[j], _y[j])) - radius;
-            bound += near > 0 ? Math.Abs(strength[j]) / (2 * Math.PI * near * near) : double.PositiveInfinity;
+            if (strength[j] != 0)
+            {
+                double near = Complex.Abs(centre - new Complex(_x[j], _y[j])) - radius;
+                bound += near > 0 ? Math.Abs(strength[j]) / (near * near) : double.PositiveInfinity;
+            }
         }
 
-        return bound;
+        return bound * WellPlaces.OneOverTwoPi;
     }
 
     /// <inheritdoc/>
@@ -138,13 +137,32 @@ public sealed class WellBank : IBank
     /// <inheritdoc/>
     public double DistanceToSingular(Complex at)
     {
-        double nearest = double.PositiveInfinity;
-        for (int j = 0; j < _x.Length; j++)
+        if (Columns == 0)
         {
-            double dx = at.Real - _x[j], dy = at.Imaginary - _y[j];
-            nearest = Math.Min(nearest, dx * dx + dy * dy);
+            return double.PositiveInfinity;
         }
 
-        return Math.Sqrt(nearest);
+        Vector256<double> nearest = Vector256.Create(double.PositiveInfinity);
+        for (int j = 0; j < _x.Length; j += WellPlaces.Lanes)
+        {
+            Vector256<double> dx = Vector256.Create(at.Real) - Vector256.Create(_x, j);
+            Vector256<double> dy = Vector256.Create(at.Imaginary) - Vector256.Create(_y, j);
+            nearest = Vector256.MinNative(nearest, dx * dx + dy * dy);
+        }
+
+        Vector128<double> half = Vector128.MinNative(nearest.GetLower(), nearest.GetUpper());
+        return Math.Sqrt(Math.Min(half[0], half[1]));
+    }
+
+    private static double[] InLanes(IReadOnlyList<Well> wells, Func<Well, double> coordinate)
+    {
+        double[] lanes = new double[(wells.Count + WellPlaces.Lanes - 1) / WellPlaces.Lanes * WellPlaces.Lanes];
+        Array.Fill(lanes, Nowhere);
+        for (int j = 0; j < wells.Count; j++)
+        {
+            lanes[j] = coordinate(wells[j]);
+        }
+
+        return lanes;
     }
 }

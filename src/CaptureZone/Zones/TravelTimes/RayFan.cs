@@ -15,22 +15,25 @@ internal sealed class RayFan
     private const int FirstRaysPerTurn = 32;
 
     /// <summary>Fronts bend between neighbours by no more than this share of the zone's radius.</summary>
-    private const double Flatness = 1.5e-4;
+    private const double Flatness = 4e-4;
 
     /// <summary>Fronts of neighbours this close need no ray between, as a share of the zone's radius.</summary>
-    private const double CloseShare = 0.01;
+    private const double CloseShare = 0.02;
 
     /// <summary>Fronts of neighbours are never farther apart than this, as a share of the zone's radius.</summary>
     private const double FarShare = 0.25;
 
     /// <summary>A front within this share of the zone's radius of a side runs along it.</summary>
-    private const double ClingShare = 2e-4;
+    private const double ClingShare = 3e-4;
+
+    /// <summary>Sides are thinned out by as much as this share of the smallest zone's radius.</summary>
+    private const double ChainShare = 1e-5;
 
     /// <summary>Angles this close on the screen are not divided there, radians.</summary>
     private const double FineAngle = 1e-3;
 
     /// <summary>Neighbours are that far apart where a ray is launched between them, as a share of the smallest zone's radius.</summary>
-    private const double LaunchShare = 1e-3;
+    private const double LaunchShare = 5e-3;
 
     /// <summary>Error of the water's volume between two neighbours that needs no ray between, as a share of rate x time.</summary>
     private const double VolumeShare = 1e-5;
@@ -41,10 +44,10 @@ internal sealed class RayFan
     private readonly RayTracing _tracing;
     private readonly ImmutableArray<double> _times;
     private readonly ImmutableArray<double> _radii;
-    private readonly SideChain[] _chains;
+    private readonly Polyline[] _chains;
     private readonly List<Ray> _rays = [];
 
-    private RayFan(RayTracing tracing, ImmutableArray<double> times, ImmutableArray<double> radii, SideChain[] chains)
+    private RayFan(RayTracing tracing, ImmutableArray<double> times, ImmutableArray<double> radii, Polyline[] chains)
     {
         _tracing = tracing;
         _times = times;
@@ -64,8 +67,8 @@ internal sealed class RayFan
     internal static RayFan Of(
         FlowTopology topology, RayTracing tracing, ScreenStretch stretch, ImmutableArray<double> times, ImmutableArray<double> radii)
     {
-        SideChain[] chains = stretch is { Begin: { } begin, End: { } end }
-            ? [SideChain.Of(topology, begin, -1), SideChain.Of(topology, end, 1)]
+        Polyline[] chains = stretch is { Begin: { } begin, End: { } end }
+            ? [SideChain.Of(topology, begin, -1, ChainShare * radii[0]), SideChain.Of(topology, end, 1, ChainShare * radii[0])]
             : [];
         RayFan fan = new(tracing, times, radii, chains);
         fan.Fill(stretch);
@@ -115,7 +118,8 @@ internal sealed class RayFan
     /// <summary>Adds the rays that are needed between two neighbours, in order.</summary>
     private void Divide(Ray a, Ray b, int depth)
     {
-        if (depth >= MostDivisions || AllTimes(i => IsClose(a, b, i) || Clinging(a, b, i) is not null))
+        if (depth >= MostDivisions
+            || AllTimes(i => VolumeDiffers(a, b, i) <= VolumeShare && (IsClose(a, b, i) || Clinging(a, b, i) is not null)))
         {
             return;
         }
@@ -125,8 +129,7 @@ internal sealed class RayFan
             return;
         }
 
-        bool enough = AllTimes(i => IsFlat(a, middle, b, i));
-        if (enough)
+        if (AllTimes(i => IsFlat(a, middle, b, i)))
         {
             _rays.Add(middle);
             return;
@@ -140,7 +143,7 @@ internal sealed class RayFan
     private bool AllTimes(Func<int, bool> holds) => Enumerable.Range(0, _times.Length).All(holds);
 
     private bool IsClose(Ray a, Ray b, int index) =>
-        Complex.Abs(a.Fronts[index] - b.Fronts[index]) <= CloseShare * _radii[index] && VolumeDiffers(a, b, index) <= VolumeShare;
+        Complex.Abs(a.Fronts[index] - b.Fronts[index]) <= CloseShare * _radii[index];
 
     private bool IsFlat(Ray a, Ray middle, Ray b, int index)
     {
@@ -165,7 +168,7 @@ internal sealed class RayFan
         return ages * Math.Abs(b.Angle - a.Angle) / (4 * Math.PI);
     }
 
-    private (SideChain Chain, SideChain.Foot From, SideChain.Foot To)? Clinging(Ray a, Ray b, int index)
+    private (Polyline Chain, Polyline.Foot From, Polyline.Foot To)? Clinging(Ray a, Ray b, int index)
     {
         if (IsClose(a, b, index))
         {
@@ -173,9 +176,9 @@ internal sealed class RayFan
         }
 
         double cling = ClingShare * _radii[index];
-        foreach (SideChain chain in _chains)
+        foreach (Polyline chain in _chains)
         {
-            SideChain.Foot from = chain.FootOf(a.Fronts[index]);
+            Polyline.Foot from = chain.FootOf(a.Fronts[index]);
             if (from.Distance <= cling && chain.FootOf(b.Fronts[index]) is var to && to.Distance <= cling)
             {
                 return (chain, from, to);
@@ -189,23 +192,23 @@ internal sealed class RayFan
     {
         Ray? middle = b.Angle - a.Angle > FineAngle
             ? _tracing.FromScreen((a.Angle + b.Angle) / 2)
-            : LaunchTime(a, b) is { } time ? _tracing.Through((a.At(time) + b.At(time)) / 2) : null;
+            : LaunchBetween(a, b) is { } launch ? _tracing.Through(launch) : null;
         return middle is null ? null : middle with { Angle = Unwrapped(middle.Angle, a.Angle, b.Angle) };
     }
 
-    /// <summary>The earliest time at which two neighbours are far enough apart for a launch between them.</summary>
-    private double? LaunchTime(Ray a, Ray b)
+    /// <summary>The middle between two neighbours, the first place from the well outward where they are far enough apart.</summary>
+    private Complex? LaunchBetween(Ray a, Ray b)
     {
         double apart = LaunchShare * _radii[0];
-        IEnumerable<double> times = a.Course.Concat(b.Course)
-            .Select(point => point.Time)
-            .Where(time => double.IsFinite(time) && time > 0)
-            .Order();
-        foreach (double time in times)
+        foreach (double time in a.Course.Concat(b.Course).Select(point => point.Time).Where(double.IsFinite).Order())
         {
-            if (Complex.Abs(a.At(time) - b.At(time)) >= apart)
+            if (time > 0 && Complex.Abs(a.At(time) - b.At(time)) >= 2 * apart)
             {
-                return time;
+                Complex first = _tracing.PlaceAt(a, time), second = _tracing.PlaceAt(b, time);
+                if (Complex.Abs(first - second) >= apart)
+                {
+                    return (first + second) / 2;
+                }
             }
         }
 

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Numerics;
 using CaptureZone.Aquifers;
+using CaptureZone.Flow;
 using CaptureZone.Topology;
 using CaptureZone.Tracing;
 
@@ -12,8 +13,8 @@ namespace CaptureZone.Zones.TravelTimes;
 /// <param name="times">The times asked, d, increasing.</param>
 internal sealed class RayTracing(FlowTopology topology, Screen screen, ImmutableArray<double> times)
 {
-    /// <summary>Courses serve to launch neighbours: a coarse resolution will do.</summary>
-    private static readonly PathResolution CourseResolution = new(0.1, double.PositiveInfinity);
+    /// <summary>Courses tell how far neighbours are apart: a coarse resolution will do.</summary>
+    private static readonly PathResolution CourseResolution = new(0.03, double.PositiveInfinity);
 
     private readonly Tracer _tracer = topology.Tracer;
 
@@ -38,14 +39,24 @@ internal sealed class RayTracing(FlowTopology topology, Screen screen, Immutable
     internal Ray Along(DividingBranch branch, double angle)
     {
         double age = branch.End.Time;
-        ImmutableArray<Complex> fronts =
-        [
-            .. times.Select(time => time < age
-                ? _tracer.Trace(branch.Launch, Sense.Downstream, age - time, null, branch.Saddle).At
-                : BeforeStagnation(branch, time - age)),
-        ];
         ImmutableArray<PathPoint> course = [.. branch.Points.Reverse().Select(point => point with { Time = age - point.Time })];
-        return new Ray(angle, fronts, double.PositiveInfinity, course);
+        Ray ray = new(angle, branch.Launch, age, branch, [], double.PositiveInfinity, course);
+        return ray with { Fronts = [.. times.Select(time => PlaceAt(ray, time))] };
+    }
+
+    /// <summary>The place on a ray from which water needs a time, exactly.</summary>
+    /// <param name="ray">The ray.</param>
+    /// <param name="time">Travel time to the well, d.</param>
+    internal Complex PlaceAt(Ray ray, double time)
+    {
+        if (time <= ray.AnchorTime)
+        {
+            return _tracer.Trace(ray.Anchor, Sense.Downstream, ray.AnchorTime - time, null, ray.Side?.Saddle ?? -1).At;
+        }
+
+        return ray.Side is { } branch
+            ? BeforeStagnation(branch, time - ray.AnchorTime)
+            : _tracer.Trace(ray.Anchor, Sense.Upstream, time - ray.AnchorTime, null).At;
     }
 
     /// <summary>Toward a point of multiplicity m the speed falls as the m-th power of the distance.</summary>
@@ -55,7 +66,7 @@ internal sealed class RayTracing(FlowTopology topology, Screen screen, Immutable
         Complex offset = branch.Launch - point.At;
         double distance = Complex.Abs(offset);
         Aquifer aquifer = topology.Field.AquiferAt(point.At);
-        var flow = topology.Field.FlowAt(branch.Launch);
+        FlowAt flow = topology.Field.FlowAt(branch.Launch);
         double rate = Complex.Abs(flow.Discharge) / (aquifer.Porosity * aquifer.SaturatedThickness(flow.Potential) * distance);
         int power = point.Multiplicity - 1;
         double share = power == 0 ? Math.Exp(-rate * time) : Math.Pow(1 + power * rate * time, -1.0 / power);
@@ -101,6 +112,6 @@ internal sealed class RayTracing(FlowTopology topology, Screen screen, Immutable
             course.Add(new PathPoint(start, age));
         }
 
-        return new Ray(angle, [.. fronts], whole, [.. course]);
+        return new Ray(angle, start, age, null, [.. fronts], whole, [.. course]);
     }
 }

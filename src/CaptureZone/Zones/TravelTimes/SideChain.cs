@@ -8,32 +8,23 @@ namespace CaptureZone.Zones.TravelTimes;
 /// One side of a stretch of screen: from the well up its dividing streamline to the stagnation point, and on along the streamline
 /// that flows into that point on the stretch's side. Late fronts cling to it.
 /// </summary>
-internal sealed class SideChain
+internal static class SideChain
 {
     /// <summary>More stagnation points than any chain passes.</summary>
     private const int MostLinks = 64;
-
-    private readonly Complex[] _vertices;
-
-    private SideChain(List<Complex> vertices) => _vertices = [.. vertices];
-
-    /// <summary>A place near the chain.</summary>
-    /// <param name="Distance">Distance to the chain, m.</param>
-    /// <param name="Segment">Index of the nearest piece's first vertex.</param>
-    /// <param name="Nearest">The nearest place on the chain, m.</param>
-    internal readonly record struct Foot(double Distance, int Segment, Complex Nearest);
 
     /// <summary>The chain along one side of a stretch.</summary>
     /// <param name="topology">The dividing streamlines.</param>
     /// <param name="branch">The branch that arrives at the well.</param>
     /// <param name="turn">-1 when the stretch lies to the right of the branch, seen with the flow; 1 to the left.</param>
-    internal static SideChain Of(FlowTopology topology, DividingBranch branch, int turn)
+    /// <param name="tolerance">Distance by which the chain may be thinned out, m.</param>
+    internal static Polyline Of(FlowTopology topology, DividingBranch branch, int turn, double tolerance)
     {
-        List<Complex> vertices = [.. branch.Points.Reverse().Select(point => point.At)];
+        List<Complex> vertices = [.. Polyline.Thinned(branch, tolerance).Reverse()];
         DividingBranch next = topology.BranchAt(branch.Saddle, branch.Order + turn);
         for (int i = 0; i < MostLinks; i++)
         {
-            vertices.AddRange(next.Points.Skip(1).Select(point => point.At));
+            vertices.AddRange(Polyline.Thinned(next, tolerance).Skip(1));
             if (next.End.Fate.Kind != FateKind.Stagnation)
             {
                 break;
@@ -42,46 +33,7 @@ internal sealed class SideChain
             next = BeyondConnection(topology, next, turn);
         }
 
-        return new SideChain(vertices);
-    }
-
-    /// <summary>The foot of a place on the chain.</summary>
-    /// <param name="at">The place, m.</param>
-    internal Foot FootOf(Complex at)
-    {
-        Foot best = new(double.PositiveInfinity, 0, default);
-        double bestSquare = double.PositiveInfinity;
-        for (int i = 1; i < _vertices.Length; i++)
-        {
-            Complex a = _vertices[i - 1], along = _vertices[i] - a, to = at - a;
-            double square = along.Real * along.Real + along.Imaginary * along.Imaginary;
-            double share = square > 0 ? Math.Clamp((to.Real * along.Real + to.Imaginary * along.Imaginary) / square, 0, 1) : 0;
-            double dx = to.Real - share * along.Real, dy = to.Imaginary - share * along.Imaginary;
-            double distance = dx * dx + dy * dy;
-            if (distance < bestSquare)
-            {
-                bestSquare = distance;
-                best = new Foot(0, i - 1, a + share * along);
-            }
-        }
-
-        return best with { Distance = Math.Sqrt(bestSquare) };
-    }
-
-    /// <summary>The chain's vertices between two feet, in the order from the first to the second.</summary>
-    /// <param name="from">The first.</param>
-    /// <param name="to">The second.</param>
-    internal IEnumerable<Complex> Between(Foot from, Foot to)
-    {
-        for (int i = from.Segment + 1; i <= to.Segment; i++)
-        {
-            yield return _vertices[i];
-        }
-
-        for (int i = from.Segment; i > to.Segment; i--)
-        {
-            yield return _vertices[i];
-        }
+        return new Polyline([.. vertices]);
     }
 
     /// <summary>A branch that comes out of another stagnation point goes on along what flows into that point on the same side.</summary>

@@ -29,29 +29,29 @@ internal static class TravelTimeZones
             [.. times.Select(time => Math.Sqrt(screen.Rate * time / (Math.PI * aquifer.Porosity * thickness)))];
         RayTracing tracing = new(topology, screen, times);
         RayFan[] fans = [.. stretches.Select(stretch => RayFan.Of(topology, tracing, stretch, times, radii))];
-        return [.. times.Select((time, index) => ZoneOf(topology.Field, screen, fans, stretches, time, index))];
+        return [.. times.Select((time, index) => ZoneOf(topology.Field, screen, fans, time, index))];
     }
 
     private static TravelTimeZone ZoneOf(
-        FlowField field, Screen screen, RayFan[] fans, ImmutableArray<ScreenStretch> stretches, double time, int index)
+        FlowField field, Screen screen, RayFan[] fans, double time, int index)
     {
         Geometry polygon = PolygonOf(fans.SelectMany(fan => fan.Front(index)));
-        double expected = fans.Zip(stretches, (fan, stretch) => VolumeOf(fan, stretch, time)).Sum();
+        double expected = fans.Sum(fan => VolumeOf(field, screen, fan, time));
         double volume = PoreVolume.Of(polygon, field, screen) - PoreVolume.Within(screen, field);
         return new TravelTimeZone(time, polygon, polygon.Area, Math.Abs(volume - expected) / expected);
     }
 
     /// <summary>Water that enters a stretch within a time: rate x time, less what had not yet been injected.</summary>
-    private static double VolumeOf(RayFan fan, ScreenStretch stretch, double time)
+    private static double VolumeOf(FlowField field, Screen screen, RayFan fan, double time)
     {
         double volume = 0;
         for (int i = 1; i < fan.Rays.Count; i++)
         {
             Ray a = fan.Rays[i - 1], b = fan.Rays[i];
-            volume += (b.Angle - a.Angle) * (Math.Min(a.Age, time) + Math.Min(b.Age, time)) / 2;
+            volume += WaterOrigins.Inflow(field, screen, a.Angle, b.Angle) * (Math.Min(a.Age, time) + Math.Min(b.Age, time)) / 2;
         }
 
-        return volume * stretch.Inflow / (stretch.To - stretch.From);
+        return volume;
     }
 
     private static Geometry PolygonOf(IEnumerable<Complex> ring)

@@ -32,13 +32,14 @@ public sealed class TextTests
         Assert.Throws<ArgumentOutOfRangeException>(() => FateText.Token(new Fate(kind, feature), Sample.Site.Model));
 
     [Fact]
-    public void Every_kind_of_finding_has_a_code_of_its_own_and_one_sentence()
+    public void Every_kind_of_finding_has_a_code_of_its_own_one_sentence_and_a_line_in_the_reference()
     {
         FindingSentence[] all =
         [
             .. Enum.GetValues<FindingKind>().Select(kind => FindingText.Of(new Finding(kind, "A", "B", 0.5, 1), Sample)),
         ];
         Assert.Equal(all.Length, all.Select(told => told.Code).Distinct().Count());
+        Assert.All(all, told => Assert.Contains($"`{told.Code}`", RepositoryFiles.Read("docs/results.md"), StringComparison.Ordinal));
         Assert.All(all, told => Assert.Matches("^[a-z]+(-[a-z]+)*$", told.Code));
         Assert.All(all, told => Assert.Matches(@"^[A-Z].*[^.]\.$", told.Text));
     }
