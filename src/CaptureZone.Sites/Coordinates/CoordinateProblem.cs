@@ -38,14 +38,11 @@ internal static class CoordinateProblem
             + $"25828-25838); {FileHint}",
     };
 
-    /// <summary>A file that is not there.</summary>
-    public static string FileMissing(string stated) =>
-        $"{Quote(stated)} was not found (looked for from the site file's folder); put the file there, or give an EPSG code such as "
-        + "\"EPSG:32614\"";
-
-    /// <summary>A file that cannot be read, or is no definition by its size.</summary>
-    public static string FileUnreadable(string stated) =>
-        $"{Quote(stated)} cannot be read as a definition of a coordinate system (no access, in use, or too large); check the file";
+    /// <summary>A file that cannot be used.</summary>
+    /// <param name="stated">Its name.</param>
+    /// <param name="problem">Why, in words that follow its name.</param>
+    public static string File(string stated, string problem) =>
+        $"{Quote(stated)} {problem}; put the definition there, or give an EPSG code such as \"EPSG:32614\"";
 
     /// <summary>A definition that is refused.</summary>
     public static string Definition(string stated, string reason) => OneLine($"{Quote(stated)} {reason}");

@@ -1,6 +1,6 @@
 using System.Diagnostics.CodeAnalysis;
 using System.Globalization;
-using System.Security;
+using System.Text;
 
 namespace CaptureZone.Sites.Coordinates;
 
@@ -14,13 +14,13 @@ public static class CoordinateSystems
 
     /// <summary>Reads a stated system.</summary>
     /// <param name="stated">"EPSG:26914", "local m", "local ft", or the name of a .prj or .wkt file.</param>
-    /// <param name="folder">Folder from which a relative file name is looked for: the site file's.</param>
+    /// <param name="files">Where a file that it names is read from: the site file's folder.</param>
     /// <param name="system">The system; null when it is refused.</param>
     /// <param name="problem">What was found, what is expected and how to mend it, in one line; empty when the system was read.</param>
-    public static bool TryRead(string stated, string folder, [NotNullWhen(true)] out CoordinateSystem? system, out string problem)
+    public static bool TryRead(string stated, ISiteFiles files, [NotNullWhen(true)] out CoordinateSystem? system, out string problem)
     {
         string trimmed = stated.Trim();
-        (system, problem) = FileOf(trimmed, folder) is { } path ? FromFile(trimmed, path)
+        (system, problem) = NamesFile(trimmed) ? FromFile(trimmed, files)
             : CodeOf(trimmed) is { } code ? FromCode(trimmed, code)
             : trimmed switch
             {
@@ -29,17 +29,6 @@ public static class CoordinateSystems
                 _ => (null, CoordinateProblem.NotUnderstood(trimmed)),
             };
         return system is not null;
-    }
-
-    /// <summary>Path of the file that a stated system names; null when it names none.</summary>
-    /// <param name="stated">The system as stated.</param>
-    /// <param name="folder">Folder from which a relative file name is looked for.</param>
-    public static string? FileOf(string stated, string folder)
-    {
-        string trimmed = stated.Trim();
-        bool isFile = trimmed.EndsWith(".prj", StringComparison.OrdinalIgnoreCase)
-            || trimmed.EndsWith(".wkt", StringComparison.OrdinalIgnoreCase);
-        return isFile ? Path.Combine(folder, trimmed) : null;
     }
 
     /// <summary>
@@ -61,6 +50,9 @@ public static class CoordinateSystems
         ? string.Create(CultureInfo.InvariantCulture, $"EPSG:{zone.Epsg} ({zone.Definition.Name})")
         : null;
 
+    private static bool NamesFile(string stated) =>
+        stated.EndsWith(".prj", StringComparison.OrdinalIgnoreCase) || stated.EndsWith(".wkt", StringComparison.OrdinalIgnoreCase);
+
     private static int? CodeOf(string stated) =>
         stated.StartsWith(EpsgPrefix, StringComparison.OrdinalIgnoreCase)
         && int.TryParse(stated.AsSpan(EpsgPrefix.Length), NumberStyles.None, CultureInfo.InvariantCulture, out int code)
@@ -71,24 +63,16 @@ public static class CoordinateSystems
         ? (ProjectedSystem.Of(stated, zone), string.Empty)
         : (null, CoordinateProblem.Code(stated, code));
 
-    private static (CoordinateSystem? System, string Problem) FromFile(string stated, string path)
+    private static (CoordinateSystem? System, string Problem) FromFile(string stated, ISiteFiles files)
     {
-        try
+        if (!files.TryRead(stated, out byte[]? bytes, out string? problem))
         {
-            var file = new FileInfo(path);
-            if (!file.Exists)
-            {
-                return (null, CoordinateProblem.FileMissing(stated));
-            }
+            return (null, CoordinateProblem.File(stated, problem));
+        }
 
-            return file.Length > LargestFile
-                ? (null, CoordinateProblem.FileUnreadable(stated))
-                : FromText(stated, File.ReadAllText(path).Trim());
-        }
-        catch (Exception e) when (e is IOException or UnauthorizedAccessException or SecurityException or ArgumentException)
-        {
-            return (null, CoordinateProblem.FileUnreadable(stated));
-        }
+        return bytes.Length > LargestFile
+            ? (null, CoordinateProblem.File(stated, "is too large for the definition of a coordinate system"))
+            : FromText(stated, Encoding.UTF8.GetString(bytes).Trim('\uFEFF', ' ', '\t', '\r', '\n'));
     }
 
     private static (CoordinateSystem? System, string Problem) FromText(string stated, string text)

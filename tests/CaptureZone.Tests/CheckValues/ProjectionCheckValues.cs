@@ -1,3 +1,4 @@
+using CaptureZone.Sites;
 using CaptureZone.Sites.Coordinates;
 
 namespace CaptureZone.Tests.CheckValues;
@@ -14,7 +15,7 @@ public sealed class ProjectionCheckValues
     {
         const double Step = 1e-3;
         const double ScaleOnTheMeridian = 0.9996;
-        Assert.True(CoordinateSystems.TryRead("EPSG:32614", ".", out CoordinateSystem? system, out _));
+        Assert.True(CoordinateSystems.TryRead("EPSG:32614", new NoFiles(), out CoordinateSystem? system, out _));
         var utm = (ProjectedSystem)system;
         double perDegree = 1 / (Step * ScaleOnTheMeridian);
         double north = (utm.FromLonLat(-99, 45 + Step / 2).Y - utm.FromLonLat(-99, 45 - Step / 2).Y) * perDegree;

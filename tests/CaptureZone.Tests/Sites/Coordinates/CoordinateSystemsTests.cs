@@ -14,7 +14,7 @@ public sealed class CoordinateSystemsTests : IDisposable
     [InlineData("local ft", "ft", 0.3048)]
     public void Local_coordinates_have_a_unit_and_no_place_on_earth(string stated, string unit, double metres)
     {
-        Assert.True(CoordinateSystems.TryRead(stated, _folder.Path, out CoordinateSystem? system, out _));
+        Assert.True(CoordinateSystems.TryRead(stated, _folder.Files, out CoordinateSystem? system, out _));
         Assert.Equal((stated, unit, metres, true), (system.Stated, system.Unit, system.MetresPerUnit, system.IsLocal));
         Assert.Equal((null, string.Empty, string.Empty), (system.Epsg, system.Wkt, system.PrjText));
         Assert.Null(system.ProblemWith(-98, 41));

@@ -31,7 +31,7 @@ public sealed class RefusalTests : IDisposable
     [InlineData("local", "'local' is not a coordinate system; local coordinates are \"local m\" or \"local ft\"")]
     [InlineData("UTM 14N", "'UTM 14N' is not a coordinate system; give an EPSG code such as \"EPSG:32614\", \"local m\", \"local ft\", or the name of a .prj or .wkt file")]
     [InlineData("EPSG:-1", "'EPSG:-1' is not a coordinate system; give an EPSG code such as \"EPSG:32614\", \"local m\", \"local ft\", or the name of a .prj or .wkt file")]
-    [InlineData("none.prj", "'none.prj' was not found (looked for from the site file's folder); put the file there, or give an EPSG code such as \"EPSG:32614\"")]
+    [InlineData("none.prj", "'none.prj' is not there (looked for from the site file's folder); put the definition there, or give an EPSG code such as \"EPSG:32614\"")]
     public void A_stated_system_that_was_not_checked_is_refused_by_name(string stated, string expected) =>
         Assert.Equal(expected, _folder.Problem(stated));
 
@@ -92,7 +92,7 @@ public sealed class RefusalTests : IDisposable
 
         File.WriteAllText(path, new string('A', 70_000));
         Assert.Equal(
-            "'x.wkt' cannot be read as a definition of a coordinate system (no access, in use, or too large); check the file",
+            "'x.wkt' is too large for the definition of a coordinate system; put the definition there, or give an EPSG code such as \"EPSG:32614\"",
             _folder.Problem("x.wkt"));
     }
 }

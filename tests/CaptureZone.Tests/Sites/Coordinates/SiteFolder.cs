@@ -1,3 +1,4 @@
+using CaptureZone.Sites;
 using CaptureZone.Sites.Coordinates;
 
 namespace CaptureZone.Tests.Sites.Coordinates;
@@ -9,13 +10,15 @@ public sealed class SiteFolder : IDisposable
 
     public string Path => _folder.FullName;
 
+    public DiskFiles Files => new(Path);
+
     public void Dispose() => _folder.Delete(recursive: true);
 
     /// <summary>The system of a definition's text, or of a code.</summary>
     public ProjectedSystem System(string definition)
     {
         string stated = Stated(definition);
-        Assert.True(CoordinateSystems.TryRead(stated, Path, out CoordinateSystem? system, out string problem), problem);
+        Assert.True(CoordinateSystems.TryRead(stated, Files, out CoordinateSystem? system, out string problem), problem);
         Assert.Empty(problem);
         return Assert.IsType<ProjectedSystem>(system);
     }
@@ -23,7 +26,7 @@ public sealed class SiteFolder : IDisposable
     /// <summary>What is wrong with a stated system or a definition's text.</summary>
     public string Problem(string definition)
     {
-        Assert.False(CoordinateSystems.TryRead(Stated(definition), Path, out CoordinateSystem? system, out string problem));
+        Assert.False(CoordinateSystems.TryRead(Stated(definition), Files, out CoordinateSystem? system, out string problem));
         Assert.Null(system);
         return problem;
     }
