@@ -1,6 +1,5 @@
 using CaptureZone.Jobs;
 using CaptureZone.Sites;
-using CaptureZone.Sites.Reading;
 
 namespace CaptureZone.Cli;
 
