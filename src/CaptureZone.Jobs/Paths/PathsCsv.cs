@@ -12,7 +12,7 @@ namespace CaptureZone.Jobs.Paths;
 public static class PathsCsv
 {
     /// <summary>What a path has lost to streams on its way, share: nothing, as a model has no streams.</summary>
-    private const double LostToStreams = 0;
+    internal const double LostToStreams = 0;
 
     /// <summary>Writes the table.</summary>
     /// <param name="site">The site.</param>

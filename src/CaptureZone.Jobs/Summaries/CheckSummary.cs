@@ -17,7 +17,7 @@ public static class CheckSummary
         to.WriteLine(site.Title);
         to.WriteLine();
         to.WriteLine("Inputs as understood");
-        List<string[]> rows = [["Coordinates", coordinates.Stated, $"{coordinates.Name}, in {coordinates.Unit}", ""]];
+        List<string[]> rows = [["crs", coordinates.Stated, $"{coordinates.Name}, in {coordinates.Unit}", ""]];
         rows.AddRange(site.Inputs.Select(input => InputRow(input, new Printer(site.Report.Units))));
         TextTable.Write(to, rows);
         WritePlumes(site, to);
@@ -30,7 +30,7 @@ public static class CheckSummary
         string understood = input.Quantity == QuantityKind.Place ? input.Written : print.Entered(input.Quantity, input.Value);
         return
         [
-            input.Label,
+            input.Key,
             understood,
             understood == input.Written ? "" : $"written {input.Written}",
             input.Source.Length == 0 ? "source not given" : input.Source,

@@ -90,6 +90,7 @@ public static class SummaryJson
             json.WriteValue("end_y", site.Frame.SiteY(end.At));
             json.WriteValue("time_d", end.Time);
             json.WriteValue("length_m", end.Length);
+            json.WriteValue("lost_to_streams", PathsCsv.LostToStreams);
             json.WriteString("fate", FateText.Token(end.Fate, site.Model));
         }));
 

@@ -18,6 +18,7 @@ public sealed record CliRun(int Code, string Output, string Error)
             Output = output,
             Error = error,
             Colours = setting.Colours,
+            Time = new ManualTime(),
             Processors = setting.Processors,
             Interruption = setting.Interruption,
             RunJob = () => setting.RunJob,
