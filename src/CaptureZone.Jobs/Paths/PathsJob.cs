@@ -68,7 +68,7 @@ public static class PathsJob
     {
         public List<PathPoint> Points { get; } = [];
 
-        public PathResolution Resolution { get; } = resolution;
+        public PathResolution ResolutionAt(Complex at) => resolution;
 
         public void Add(Complex at, double time) => Points.Add(new PathPoint(at, time));
     }
