@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using System.Numerics;
 using CaptureZone.Jobs.Points;
 using CaptureZone.Sites;
 using CaptureZone.Topology;
@@ -53,23 +52,14 @@ public static class PathsJob
 
     private static PathRow Follow(Tracer tracer, SiteDocument site, NamedPoint point, PathsRequest request)
     {
-        Vertices? vertices = request.Lines ? new Vertices(ResolutionFor(site.Model)) : null;
+        PathRecorder? vertices = request.Lines ? new PathRecorder(ResolutionFor(site.Model)) : null;
         PathEnd end = tracer.Trace(site.Frame.ToLocal(point.X, point.Y), request.Sense, request.Longest, vertices);
-        return new PathRow(point, end, vertices is null ? [] : [.. vertices.Points]);
+        return new PathRow(point, end, vertices?.ToPoints() ?? []);
     }
 
     private static PathResolution ResolutionFor(Model model)
     {
         double largest = model.Wells.Select(well => Math.Abs(well.Rate)).DefaultIfEmpty().Max();
         return new PathResolution(Turn, largest > 0 ? LeakShare * largest : double.PositiveInfinity);
-    }
-
-    private sealed class Vertices(PathResolution resolution) : IPathSink
-    {
-        public List<PathPoint> Points { get; } = [];
-
-        public PathResolution ResolutionAt(Complex at) => resolution;
-
-        public void Add(Complex at, double time) => Points.Add(new PathPoint(at, time));
     }
 }

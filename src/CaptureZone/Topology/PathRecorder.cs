@@ -6,7 +6,7 @@ namespace CaptureZone.Topology;
 
 /// <summary>Keeps the vertices of a path.</summary>
 /// <param name="resolution">How finely.</param>
-internal sealed class PathRecorder(PathResolution resolution) : IPathSink
+public sealed class PathRecorder(PathResolution resolution) : IPathSink
 {
     private readonly ImmutableArray<PathPoint>.Builder _points = ImmutableArray.CreateBuilder<PathPoint>();
 
@@ -16,6 +16,6 @@ internal sealed class PathRecorder(PathResolution resolution) : IPathSink
     /// <inheritdoc/>
     public void Add(Complex at, double time) => _points.Add(new PathPoint(at, time));
 
-    /// <summary>The vertices.</summary>
-    internal ImmutableArray<PathPoint> ToPoints() => _points.DrainToImmutable();
+    /// <summary>The vertices; empties the recorder.</summary>
+    public ImmutableArray<PathPoint> ToPoints() => _points.DrainToImmutable();
 }

@@ -11,6 +11,9 @@ namespace CaptureZone.Topology;
 /// </summary>
 public sealed class RationalFlow
 {
+    /// <summary>A sink is the nearer one only when its squared distance is below this share, so that ties do not alternate.</summary>
+    private const double Closer = 0.5;
+
     private readonly double[] _x;
     private readonly double[] _y;
     private readonly double[] _strength;
@@ -141,9 +144,6 @@ public sealed class RationalFlow
         };
     }
 
-    /// <summary>A sink is the nearer one only when its squared distance is below this share, so that ties do not alternate.</summary>
-    private const double Closer = 0.5;
-
     private static double RateAtFirst(int well, ReadOnlySpan<Complex> places, ReadOnlySpan<double> rates)
     {
         double sum = rates[well];
@@ -162,36 +162,4 @@ public sealed class RationalFlow
 
         return sum;
     }
-}
-
-/// <summary>A place as an offset from a sink, m.</summary>
-internal readonly record struct NearSink(int Sink, double X, double Y)
-{
-    internal Complex Offset => new(X, Y);
-
-    internal double Distance => Math.Sqrt(X * X + Y * Y);
-
-    internal NearSink Moved(Complex by) => new(Sink, X + by.Real, Y + by.Imaginary);
-
-    internal NearSink SeenFrom(int sink, RationalFlow flow) =>
-        sink == Sink ? this : new NearSink(sink, 0, 0).Moved(flow.Between(sink, Sink) + Offset);
-}
-
-/// <summary>W near a sink, its pole lifted.</summary>
-internal readonly struct LiftedFlow
-{
-    /// <summary>g = W (z - z_a), m3/d.</summary>
-    internal Complex Value { get; init; }
-
-    /// <summary>dg/dz, m2/d.</summary>
-    internal Complex Slope { get; init; }
-
-    /// <summary>Sum of 1 / (z - z_j) over the other sinks, 1/m.</summary>
-    internal Complex OtherPoles { get; init; }
-
-    /// <summary>Sum of the sizes of the terms of <see cref="Value"/>, m3/d; at most sqrt 2 too large, never too small.</summary>
-    internal double Size { get; init; }
-
-    /// <summary>The sink that is clearly nearer; else the one it was asked from.</summary>
-    internal int Nearest { get; init; }
 }

@@ -9,7 +9,7 @@ using CaptureZone.Topology;
 
 namespace CaptureZone.Tests.CheckValues;
 
-/// <summary>Stagnation points of published cases and of published formulas. "Seen" and "from memory" tell how the source was taken.</summary>
+/// <summary>Stagnation points of published cases and of published formulas. "Seen" and "from memory" say how.</summary>
 public sealed class StagnationValues
 {
     private const double Relative = 1e-6;

@@ -26,8 +26,8 @@ internal static class HandCheckSection
         yield return new Table(
             "Formulas for one well alone, beside the computed values.",
             [
-                new("Well", 22), new("Quantity", 30), new("Formula", 22), facts.NumberColumn("By hand", QuantityKind.Length, 13),
-                facts.NumberColumn("Computed", QuantityKind.Length, 13),
+                new("Well", 22), new("Quantity", 30), new("Formula", 20), facts.NumberColumn("By hand", QuantityKind.Length, 14),
+                facts.NumberColumn("Computed", QuantityKind.Length, 16),
             ],
             rows);
         yield return new Paragraph(Remark(facts));
@@ -88,8 +88,9 @@ internal static class HandCheckSection
                 + "share the regional flow and move each other's stagnation points and edges, and injected water takes the place of "
                 + "regional water, which narrows the zones far upgradient."
             : "Here one well acts alone, so computed and hand values should agree.";
-        return $"Distances and widths by hand hold for one well alone in uniform flow. {why} The radii should agree however many wells act, "
-            + "because a travel-time zone holds what the well takes in the time, whatever its shape; they differ where injected water "
+        return $"Distances and widths by hand hold for one well alone in uniform flow. {why} The radii should agree "
+            + "however many wells act, because a travel-time zone holds what the well takes in the time, "
+            + "whatever its shape; they differ where injected water "
             + "enters inside the zone or the saturated thickness is not b everywhere.";
     }
 }

@@ -18,7 +18,7 @@ internal static class MapSection
         string wells = facts.Wells.IsEmpty ? "no well" : "wells " + Facts.Names(facts.Wells.Select(well => well.Name));
         string plumes = facts.Answers.Plumes.IsEmpty
             ? "no plume"
-            : "plumes " + Facts.Names(facts.Plumes.Select(plume => plume.Plume.Name));
+            : (facts.Answers.Plumes.Length == 1 ? "plume " : "plumes ") + Facts.Names(facts.Plumes.Select(plume => plume.Plume.Name));
         return $"Map of {facts.Site.Title} with {wells}, {plumes}, predicted capture zones and travel-time zones, and lines of equal "
             + $"head every {facts.Print.Length(facts.Answers.ContourInterval)}.";
     }

@@ -7,9 +7,9 @@ internal static class MethodSection
     [
         new Heading(1, "Method"),
         new Paragraph(
-            "Steady flow is written in the discharge potential, which is the same function of head under confined and water-table "
-            + "conditions up to the change at the aquifer's top (Strack 1989; Haitjema 1995). In it, uniform regional flow and wells are "
-            + "exact solutions that add (Bear 1979; Strack 1989)."),
+            "Steady flow is written in the discharge potential, which joins confined and water-table flow where the head meets the "
+            + "aquifer's top (Strack 1989; Haitjema 1995). In it, uniform regional flow and wells are exact solutions that add "
+            + "(Bear 1979; Strack 1989)."),
         new Paragraph(
             (facts.Answers.StagnationComplete
                 ? "Every stagnation point is found. "

@@ -29,8 +29,9 @@ internal static class WellsSection
             ],
             [.. facts.Answers.Wells.Select(answer => Levels(facts.Wells[answer.Well], answer, facts))]);
         yield return new Paragraph(
-            "The head is the mean round the screen, without losses inside the well. The drawdown is the head with all wells off less the "
-            + "head with them on, under the same known head; negative where the level rises. The largest rate, the others held, brings the "
+            "Rates are positive for extraction and negative for injection. The head is the mean round the screen, without "
+            + "losses inside the well. The drawdown is the head with all wells off less the head with them on, under "
+            + "the same known head; negative where the level rises. The largest rate, the others held, brings the "
             + "level at the screen to the base: a theoretical ceiling and not a rate to pump.");
     }
 
@@ -44,13 +45,7 @@ internal static class WellsSection
         answer.LargestRate is { } rate ? facts.Print.Number(QuantityKind.Rate, rate) : Printer.NotANumber,
     ];
 
-    private static string Purpose(Well well) => well switch
-    {
-        { Rate: < 0 } => "injection",
-        { Purpose: WellPurpose.Containment } => "containment",
-        { Purpose: WellPurpose.Supply } => "supply",
-        _ => "other",
-    };
+    private static string Purpose(Well well) => well.Rate < 0 ? "injection" : WellText.Token(well.Purpose);
 
     private static IEnumerable<Block> Zones(Facts facts)
     {

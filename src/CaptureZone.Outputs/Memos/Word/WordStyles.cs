@@ -25,10 +25,13 @@ internal static class WordStyles
     public const string Footer = "Footer";
 
     /// <summary>Dark blue of headings and rules; black enough in grey print.</summary>
-    public const string Ink = "1F3A57";
+    public const string Ink = "123F6B";
 
     /// <summary>Pale ground of header rows and of the verdict.</summary>
     public const string Ground = "E9EEF3";
+
+    /// <summary>Pale blue of the rules between a table's rows.</summary>
+    public const string Pale = "B9C6D2";
 
     /// <summary>Dark orange at the side of a warning; told from the verdict by its text and its place as well.</summary>
     private const string Alert = "A4480F";
@@ -56,10 +59,10 @@ internal static class WordStyles
         Paragraph(Caution, "Caution", 18, Space(60, 160), isItalic: true),
         Paragraph(Cell, "Table Text", 17, Space(20, 20)),
         Paragraph(HeaderCell, "Table Header", 17, [new KeepNext(), .. Space(30, 30)], isBold: true),
-        Paragraph(Label, "Form Label", 20, Space(20, 20), isBold: true),
-        Paragraph(Value, "Form Value", 20, Space(20, 20)),
+        Paragraph(Label, "Form Label", 19, Space(20, 20), isBold: true),
+        Paragraph(Value, "Form Value", 19, Space(20, 20)),
         Paragraph(Gap, "Gap", 8, Space(0, 60)),
-        Paragraph(Code, "Code", 15, Space(0, 0), font: Mono),
+        Paragraph(Code, "Code", 14, Space(0, 0), font: Mono),
         Paragraph(Picture, "Picture", 20, [new KeepNext(), .. Space(120, 60), new Justification { Val = JustificationValues.Center }]),
         Paragraph(Header, "header", 15, Space(0, 0)),
         Paragraph(Footer, "footer", 15, Space(0, 0)));
@@ -73,7 +76,12 @@ internal static class WordStyles
         id,
         name,
         halfPoints,
-        [new KeepNext(), new KeepLines(), .. space, .. level is { } value ? [new OutlineLevel { Val = value }] : Array.Empty<OpenXmlElement>()],
+        [
+            new KeepNext(),
+            new KeepLines(),
+            .. space,
+            .. level is { } value ? [new OutlineLevel { Val = value }] : Array.Empty<OpenXmlElement>(),
+        ],
         isBold: true,
         colour: Ink);
 
@@ -89,7 +97,13 @@ internal static class WordStyles
         string font = Sans,
         string? colour = null)
     {
-        Style style = new() { Type = StyleValues.Paragraph, StyleId = id, Default = isDefault ? true : null, CustomStyle = IsOwn(id) ? true : null };
+        Style style = new()
+        {
+            Type = StyleValues.Paragraph,
+            StyleId = id,
+            Default = isDefault ? true : null,
+            CustomStyle = IsOwn(id) ? true : null,
+        };
         style.Append(new StyleName { Val = name });
         if (!isDefault)
         {
@@ -100,7 +114,8 @@ internal static class WordStyles
         return style;
     }
 
-    private static bool IsOwn(string id) => id is Verdict or Warning or Caution or Cell or HeaderCell or Label or Value or Gap or Code or Picture;
+    private static bool IsOwn(string id) =>
+        id is Verdict or Warning or Caution or Cell or HeaderCell or Label or Value or Gap or Code or Picture;
 
     private static StyleRunProperties Look(int halfPoints, bool isBold, bool isItalic, string font, string? colour)
     {

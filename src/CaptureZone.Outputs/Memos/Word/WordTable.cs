@@ -15,8 +15,8 @@ internal static class WordTable
     /// <summary>Left and right in every cell, twentieths of a point: 1.8 mm.</summary>
     private const short CellMargin = 100;
 
-    /// <summary>A form's labels take this share of the width.</summary>
-    private const double LabelShare = 0.3;
+    /// <summary>A form's labels take this share of the width; the rest holds a SHA-256 on one line.</summary>
+    private const double LabelShare = 0.27;
 
     /// <summary>The table with its caption above it, and a space below.</summary>
     /// <param name="table">The table.</param>
@@ -25,7 +25,7 @@ internal static class WordTable
     {
         int[] widths = Widths([.. table.Columns.Select(column => column.Width)], page.TextWidth);
         W.Table grid = Grid(widths, new TableBorders(
-            Rule<TopBorder>(8), Rule<BottomBorder>(8), Rule<InsideHorizontalBorder>(2)));
+            Rule<TopBorder>(8), Rule<BottomBorder>(8), Rule<InsideHorizontalBorder>(4, WordStyles.Pale)));
         grid.Append(HeaderRow(table, widths));
         for (int i = 0; i < table.Rows.Length; i++)
         {
@@ -129,8 +129,8 @@ internal static class WordTable
         return paragraph;
     }
 
-    private static TBorder Rule<TBorder>(uint eighths)
-        where TBorder : BorderType, new() => new() { Val = BorderValues.Single, Size = eighths, Space = 0, Color = WordStyles.Ink };
+    private static TBorder Rule<TBorder>(uint eighths, string colour = WordStyles.Ink)
+        where TBorder : BorderType, new() => new() { Val = BorderValues.Single, Size = eighths, Space = 0, Color = colour };
 
     private static int[] Widths(double[] shares, int total) => [.. shares.Select(share => (int)(share / shares.Sum() * total))];
 

@@ -37,7 +37,8 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
     private static int? OpenListBefore(DocumentSyntax document, string text, int offset)
     {
         bool beginsLine = offset == text.Length || string.IsNullOrWhiteSpace(text[StartOfLine(text, offset)..offset]);
-        return beginsLine ? document.Descendants().OfType<ArraySyntax>().LastOrDefault(array => array.CloseBracket is null)?.Span.Start.Offset : null;
+        ArraySyntax? open = document.Descendants().OfType<ArraySyntax>().LastOrDefault(array => array.CloseBracket is null);
+        return beginsLine ? open?.Span.Start.Offset : null;
     }
 
     private static int StartOfLine(string text, int offset) => offset == 0 ? 0 : text.LastIndexOf('\n', offset - 1) + 1;
@@ -83,7 +84,8 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
 
         if (sign.Value == ":")
         {
-            return new(start, start + sign.Index, $"a key and its value are parted by \"=\", not \":\"; write {key} = {Words.Short(value)}", $"{key} = {value}");
+            string words = $"a key and its value are parted by \"=\", not \":\"; write {key} = {Words.Short(value)}";
+            return new(start, start + sign.Index, words, $"{key} = {value}");
         }
 
         string numeral = value.Replace(',', '.');
@@ -115,7 +117,9 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
     [GeneratedRegex(@"^[^=,]*\[\s*[^\d\s+\[-][^=,]*$|^[^=,]*\[\[[^=,]*$", RegexOptions.CultureInvariant)]
     private static partial Regex MaybeHeader();
 
-    [GeneratedRegex(@"^\s*(?<key>[A-Za-z0-9_.-]+|""[^""]*"")\s*(?<sign>[=:])\s*(?<value>(""[^""]*""|[^#""])*?(""[^""]*)?)\s*(#.*)?$", RegexOptions.CultureInvariant)]
+    [GeneratedRegex(
+        @"^\s*(?<key>[A-Za-z0-9_.-]+|""[^""]*"")\s*(?<sign>[=:])\s*(?<value>(""[^""]*""|[^#""])*?(""[^""]*)?)\s*(#.*)?$",
+        RegexOptions.CultureInvariant)]
     private static partial Regex KeyLine();
 
     [GeneratedRegex(@"=\s*\[.*[\d""\]]\s*$", RegexOptions.CultureInvariant)]

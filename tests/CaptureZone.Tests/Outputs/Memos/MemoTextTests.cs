@@ -72,10 +72,25 @@ public sealed class MemoTextTests
         Assert.Equal(1, inputs.Number);
         Assert.Equal(Sample.Site.Inputs.Length, inputs.Rows.Length);
         Assert.Equal(
-            ["Hydraulic conductivity", "18", "m/d", "18 m/d", "0.1 to 1000 m/d (common practice, no source)", "pumping test PT-1, May 2026"],
+            [
+                "Hydraulic conductivity", "18", "m/d", "18 m/d", "0.1 to 1000 m/d (common practice, no source)",
+                "pumping test PT-1, May 2026",
+            ],
             inputs.Rows[0].AsEnumerable());
         Assert.Equal("source not given", inputs.Rows[3][^1]);
         Assert.Equal(["59.055", "ft/d", "18 m/d"], Tables(SampleReport.Create(ReportUnits.Us))[0].Rows[0].Skip(1).Take(3));
+    }
+
+    [Fact]
+    public void An_input_of_a_well_or_plume_bears_its_name()
+    {
+        InputEntry rate = new("well.RW-1.extracts", "Extraction rate", "6.5 L/s", QuantityKind.Rate, 561.6, "", "");
+        InputEntry outline = new("plume.TCE, 2.5 ug/L.outline", "Plume outline", "16 corners", QuantityKind.Area, 1000, "", "");
+        InputEntry place = new("regional_flow.head_at", "Place of the known head", "[1.0, 2.0]", QuantityKind.Place, 0, "", "");
+        Table inputs = Tables(Sample with { Site = Sample.Site with { Inputs = [rate, outline, place] } })[0];
+        Assert.Equal(["RW-1: Extraction rate", "561.6", "m3/d", "6.5 L/s", "", "source not given"], inputs.Rows[0].AsEnumerable());
+        Assert.Equal("TCE, 2.5 ug/L: Plume outline", inputs.Rows[1][0]);
+        Assert.Equal(["Place of the known head", "", "", "[1.0, 2.0]"], inputs.Rows[2].Take(4));
     }
 
     [Fact]

@@ -77,7 +77,7 @@ public sealed class WordWriterTests
         {
             Assert.All(grid.Elements<TableRow>(), row => Assert.Equal(
                 table.Columns.Select(column => column.IsNumeric),
-                row.Elements<TableCell>().Select(cell => cell.Descendants<Justification>().Any(at => at.Val! == JustificationValues.Right))));
+                row.Elements<TableCell>().Select(IsFlushRight)));
         }
     }
 
@@ -127,6 +127,9 @@ public sealed class WordWriterTests
             Directory.Delete(folder, recursive: true);
         }
     }
+
+    private static bool IsFlushRight(TableCell cell) =>
+        cell.Descendants<Justification>().Any(at => at.Val! == JustificationValues.Right);
 
     private static byte[] Write(Report report) => WordWriter.Write(MemoText.Of(report, "map.png"), Picture);
 
