@@ -38,7 +38,8 @@ internal sealed partial class TableReader
         if (n[0] >= n[2] || n[1] >= n[3])
         {
             Error(
-                field.Key, $"{field.Key} is [xmin, ymin, xmax, ymax]: the first number must be below the third, the second below the fourth");
+                field.Key,
+                $"{field.Key} is [xmin, ymin, xmax, ymax]: the first number must be below the third, the second below the fourth");
             return null;
         }
 

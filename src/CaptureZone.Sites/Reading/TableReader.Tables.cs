@@ -84,7 +84,8 @@ internal sealed partial class TableReader
             {
                 string line = Words.Number(site.Complaints.Source.PlaceOf(first[name.Value].Start).Line);
                 site.Complaints.Error(
-                    name.Start, $"the name {Words.Quote(name.Value)} is already taken on line {line}; every [[{kind}]] needs a name of its own");
+                    name.Start,
+                    $"the name {Words.Quote(name.Value)} is already taken on line {line}; every [[{kind}]] needs a name of its own");
             }
         }
     }

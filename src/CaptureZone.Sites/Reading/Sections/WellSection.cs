@@ -72,7 +72,8 @@ internal static class WellSection
         if (table.Has("injects") && purpose is WellPurpose.Containment or WellPurpose.Supply)
         {
             table.Error(
-                "purpose", "the purpose of a well that injects can only be \"other\", since capture counts what is extracted; leave it out");
+                "purpose",
+                "the purpose of a well that injects can only be \"other\", since capture counts what is extracted; leave it out");
         }
     }
 }

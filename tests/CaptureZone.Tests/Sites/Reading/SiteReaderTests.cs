@@ -65,7 +65,7 @@ public sealed class SiteReaderTests
         Assert.Equal(160 * 0.3048, Complex.Abs(site.Model.Wells[1].At - site.Model.Wells[0].At), 1e-12);
         Assert.Equal(50 * 0.3048, site.Model.Aquifer.Conductivity, 1e-14);
         Assert.Equal(4 * 0.0254, site.Model.Wells[0].Radius, 1e-15);
-        Assert.Equal(16 * 5.45099296896, site.Model.Wells[0].Rate, 1e-9);
+        Assert.Equal(24 * 5.45099296896, site.Model.Wells[0].Rate, 1e-9);
         Assert.Equal(0.3048, site.Questions.HeadUnit, Exact);
         Assert.Equal(ReportUnits.Us, site.Report.Units);
     }
