@@ -87,7 +87,7 @@ internal static class SelfChecks
             Coordinate at = new(
                 extent.MinX + extent.Width * SeededUniform.At(2 * i),
                 extent.MinY + extent.Height * SeededUniform.At(2 * i + 1));
-            Fate fate = topology.Tracer.Trace(GeometryKit.ToComplex(at), Sense.Downstream, double.PositiveInfinity, null).Fate;
+            Fate fate = topology.Scout.Trace(GeometryKit.ToComplex(at), Sense.Downstream, double.PositiveInfinity, null).Fate;
             foreach ((int well, Geometry zone, IndexedPointInAreaLocator locator) in zones)
             {
                 bool inZone = locator.Locate(at) != Location.Exterior;

@@ -104,7 +104,7 @@ public static class PlumeJudge
             {
                 if (locator.Locate(new Coordinate(x, y)) == Location.Interior)
                 {
-                    PathEnd end = topology.Tracer.Trace(new Complex(x, y), Sense.Downstream, double.PositiveInfinity, null);
+                    PathEnd end = topology.Scout.Trace(new Complex(x, y), Sense.Downstream, double.PositiveInfinity, null);
                     if (isChosen(end.Fate))
                     {
                         times.Add(end.Time * retardation);
