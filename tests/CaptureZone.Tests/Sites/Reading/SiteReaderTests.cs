@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Numerics;
 using System.Security.Cryptography;
 using System.Text;
+using CaptureZone.Aquifers;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Sites;
 using CaptureZone.Sites.Reading;
@@ -20,7 +21,7 @@ public sealed class SiteReaderTests
         SiteDocument site = Document(SmallSite.Text);
         Assert.Equal("Small site", site.Title);
         Assert.Equal(26914, site.Coordinates.Epsg);
-        Assert.Equal(new Aquifers.Aquifer(18, 212, 224, 0.24), site.Model.Aquifer);
+        Assert.Equal(new Aquifer(18, 212, 224, 0.24), site.Model.Aquifer);
         Assert.Equal(0.0031, site.Model.Regional.Gradient, Exact);
         Assert.Equal((90 - 112) * Math.PI / 180, site.Model.Regional.Direction, Exact);
         Assert.Equal(238.6, site.Model.Regional.Head, Exact);
