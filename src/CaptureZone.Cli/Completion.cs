@@ -4,7 +4,9 @@ using System.Globalization;
 
 namespace CaptureZone.Cli;
 
-/// <summary>Answers a shell that asks how a line may go on: <c>capturezone [suggest:N] "the line"</c>, N being where the cursor stands.</summary>
+/// <summary>
+/// Answers a shell that asks how a line may go on: <c>capturezone [suggest:N] "the line"</c>, N being where the cursor stands.
+/// </summary>
 internal static class Completion
 {
     private const string Ask = "[suggest";

@@ -3,8 +3,8 @@ using System.Runtime.InteropServices;
 namespace CaptureZone.Cli;
 
 /// <summary>
-/// Someone's wish that the program ends early. The first signal stops the work in an orderly way; a second one ends the process
-/// as the system does.
+/// Someone's wish that the program ends early. While long work is done, the first signal stops it in an orderly way; a second one, or
+/// one at any other time (waiting for input, say), ends the process as the system does.
 /// </summary>
 public sealed class Interruption : IDisposable
 {
@@ -16,6 +16,9 @@ public sealed class Interruption : IDisposable
 
     /// <summary>The exit code that belongs to what stopped the work; 0 while nothing has.</summary>
     public int Code { get; private set; }
+
+    /// <summary>Whether work is being done that must be stopped in an orderly way.</summary>
+    public bool Working { get; set; }
 
     /// <summary>Listens to the process's signals.</summary>
     public static Interruption OfProcess()
@@ -47,7 +50,10 @@ public sealed class Interruption : IDisposable
 
     private void Listen(PosixSignal signal, int code) => _signals.Add(PosixSignalRegistration.Create(signal, context =>
     {
-        context.Cancel = Code == 0;
-        Stop(code);
+        if (Working && Code == 0)
+        {
+            context.Cancel = true;
+            Stop(code);
+        }
     }));
 }

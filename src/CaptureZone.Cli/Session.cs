@@ -79,14 +79,16 @@ internal sealed class Session
     {
         int count = threads ?? _surroundings.Processors;
         IWorkers workers = count > 1 ? new ThreadWorkers(count) : new OneWorker();
-        CancellationToken cancel = _surroundings.Interruption.Token;
-        if (Quiet)
+        using ProgressLine? progress = Quiet ? null : new ProgressLine(_surroundings.Error, _surroundings.Terminal, _surroundings.Time);
+        _surroundings.Interruption.Working = true;
+        try
         {
-            return body(new Work(workers, null, cancel));
+            return body(new Work(workers, progress, _surroundings.Interruption.Token));
         }
-
-        using ProgressLine progress = new(_surroundings.Error, _surroundings.Terminal, _surroundings.Time);
-        return body(new Work(workers, progress, cancel));
+        finally
+        {
+            _surroundings.Interruption.Working = false;
+        }
     }
 
     /// <summary>Reads a file, or standard input for "-".</summary>

@@ -11,7 +11,7 @@ public static class CheckJob
     public static SiteDocument Check(SiteInput input)
     {
         SiteDocument site = input.Read();
-        SiteFlow.Solve(site);
+        Dewatering.Refuse(site, () => SiteAnalysis.CheckYield(site.Model));
         return site;
     }
 }

@@ -24,6 +24,17 @@ internal static class Dewatering
         }
     }
 
+    /// <summary>Checks something of a site.</summary>
+    /// <param name="site">The site.</param>
+    /// <param name="check">Checks it.</param>
+    /// <exception cref="InputRefusedException">A well takes more than the aquifer yields.</exception>
+    public static void Refuse(SiteDocument site, Action check) =>
+        Refuse(site, () =>
+        {
+            check();
+            return true;
+        });
+
     private static Complaint Complaint(SiteDocument site, int well, double largestRate)
     {
         Printer print = new(site.Report.Units);

@@ -9,6 +9,9 @@ internal static class SiteFlow
     /// <summary>Solves the flow.</summary>
     /// <param name="site">The site.</param>
     /// <exception cref="InputRefusedException">A well takes more than the aquifer yields.</exception>
-    public static FlowField Solve(SiteDocument site) =>
-        Dewatering.Refuse(site, () => FlowSystem.Assemble(site.Model).Solve());
+    public static FlowField Solve(SiteDocument site)
+    {
+        Dewatering.Refuse(site, () => SiteAnalysis.CheckYield(site.Model));
+        return FlowSystem.Assemble(site.Model).Solve();
+    }
 }

@@ -84,7 +84,9 @@ public static class PointTable
         {
             if (row.Length != fields)
             {
-                Complain(row[0], $"this line has {row.Length} fields, the heading {fields}; a number takes a point, a name with a comma quotes");
+                Complain(
+                    row[0],
+                    $"this line has {row.Length} fields, the heading {fields}; a number takes a point, a name with a comma quotes");
                 return null;
             }
 

@@ -13,6 +13,7 @@ internal static class Look
     public const float NameSize = 38;
     public const float BodySize = 36;
     public const float SmallSize = 32;
+    public const float LongestLeader = 1000;
     public const float HaloWidth = 10;
 
     public const float ContainmentGlowWidth = 28;
@@ -64,6 +65,13 @@ internal static class Look
     private static readonly Pen[] TravelTimePens =
         [new(TravelTime, 4), new(TravelTime, 4, 28, 12), new(TravelTime, 4, 14, 9), new(TravelTime, 4, 4, 8)];
 
+    /// <summary>Every colour that fills places: all of the above, and the glow over paper and tints.</summary>
+    public static IEnumerable<SKColor> FlatColors =>
+    [
+        Paper, Ink, SoftInk, Containment, ContainmentTint1, ContainmentTint2, ContainmentTint3, Supply, SupplyTint1, SupplyTint2,
+        SupplyTint3, TravelTime, Plume, Head, Dividing, Arrow, Backdrop, Grid, .. Tints(true).Prepend(Paper).Select(Glowing),
+    ];
+
     /// <summary>The pen of a travel time.</summary>
     /// <param name="index">The time's place in the questions.</param>
     public static Pen TravelTimePen(int index) => TravelTimePens[index % TravelTimePens.Length];
@@ -77,4 +85,13 @@ internal static class Look
     public static SKColor[] Tints(bool containment) => containment
         ? [ContainmentTint1, ContainmentTint2, ContainmentTint3]
         : [SupplyTint1, SupplyTint2, SupplyTint3];
+
+    private static SKColor Glowing(SKColor below)
+    {
+        SKColor glow = ContainmentGlow;
+        return new(Mixed(glow.Red, below.Red), Mixed(glow.Green, below.Green), Mixed(glow.Blue, below.Blue));
+
+        static byte Mixed(byte glow, byte below) =>
+            (byte)((glow * ContainmentGlowAlpha + below * (byte.MaxValue - ContainmentGlowAlpha)) / byte.MaxValue);
+    }
 }

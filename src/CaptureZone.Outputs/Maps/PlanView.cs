@@ -11,7 +11,7 @@ namespace CaptureZone.Outputs.Maps;
 internal sealed class PlanView
 {
     /// <summary>Vertices nearer than this to the last one drawn are left out, units of the sheet.</summary>
-    private const float Finest = 0.6f;
+    private const float Finest = 1.5f;
 
     /// <summary>Shapes are cut this far outside the frame, as a share of it, so that the cut never shows.</summary>
     private const double CutBeyond = 0.05;

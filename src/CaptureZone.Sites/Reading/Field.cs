@@ -13,7 +13,8 @@ internal sealed record Field(string Key, string Label, string Example)
     public Limit Limit { get; init; } = Limit.None;
 
     /// <summary>The example as a TOML value: numbers, dates and lists bare, all else in quotes.</summary>
-    public string ExampleValue => Example[0] == '[' || (char.IsAsciiDigit(Example[0]) && !Example.Contains(' ')) ? Example : $"\"{Example}\"";
+    public string ExampleValue =>
+        Example[0] == '[' || (char.IsAsciiDigit(Example[0]) && !Example.Contains(' ')) ? Example : $"\"{Example}\"";
 
     /// <summary>Which values are usual.</summary>
     public UsualRange? Usual { get; init; }

@@ -77,19 +77,19 @@ internal sealed class GeoJsonShape
 
         if (_projected is not null && root.TryGetProperty("coordinates", out JsonElement kind) && kind.ValueKind == JsonValueKind.String)
         {
-            throw new UnusableException($"has local coordinates, but the site is in {_projected.Name}; export it in longitude and latitude");
+            throw new UnusableException(
+                $"has local coordinates, but the site is in {_projected.Name}; export it in longitude and latitude");
         }
     }
 
     private Geometry Shape(JsonElement json)
     {
-        string type = json.ValueKind == JsonValueKind.Object && json.TryGetProperty("type", out JsonElement name) && name.ValueKind == JsonValueKind.String
-            ? name.GetString()!
-            : throw new UnusableException("is not GeoJSON: an object without \"type\"");
-        return type switch
+        return TypeOf(json) switch
         {
             "FeatureCollection" => Collect(List(json, "features").Select(Shape)),
-            "Feature" => json.TryGetProperty("geometry", out JsonElement inner) && inner.ValueKind != JsonValueKind.Null ? Shape(inner) : Collect([]),
+            "Feature" => json.TryGetProperty("geometry", out JsonElement inner) && inner.ValueKind != JsonValueKind.Null
+                ? Shape(inner)
+                : Collect([]),
             "GeometryCollection" => Collect(List(json, "geometries").Select(Shape)),
             "Point" => SiteGeometry.Factory.CreatePoint(Position(Member(json, "coordinates"))),
             "MultiPoint" => Collect(List(json, "coordinates").Select(point => SiteGeometry.Factory.CreatePoint(Position(point)))),
@@ -97,14 +97,24 @@ internal sealed class GeoJsonShape
             "MultiLineString" => Collect(List(json, "coordinates").Select(Line)),
             "Polygon" => Polygon(Member(json, "coordinates")),
             "MultiPolygon" => Collect(List(json, "coordinates").Select(Polygon)),
-            _ => throw new UnusableException($"is not GeoJSON: unknown type {Words.Quote(type)}"),
+            { } type => throw new UnusableException($"is not GeoJSON: unknown type {Words.Quote(type)}"),
         };
     }
+
+    private static string TypeOf(JsonElement json) =>
+        json.ValueKind == JsonValueKind.Object
+        && json.TryGetProperty("type", out JsonElement name)
+        && name.ValueKind == JsonValueKind.String
+            ? name.GetString()!
+            : throw new UnusableException("is not GeoJSON: an object without \"type\"");
 
     /// <summary>One shape as itself, several as a collection of their kind; nested ones laid flat.</summary>
     private static Geometry Collect(IEnumerable<Geometry> shapes)
     {
-        Geometry[] all = [.. shapes.SelectMany(shape => Enumerable.Range(0, shape.NumGeometries).Select(shape.GetGeometryN)).Where(part => !part.IsEmpty)];
+        Geometry[] all =
+        [
+            .. shapes.SelectMany(shape => Enumerable.Range(0, shape.NumGeometries).Select(shape.GetGeometryN)).Where(part => !part.IsEmpty),
+        ];
         return SiteGeometry.Factory.BuildGeometry(all);
     }
 
@@ -185,7 +195,9 @@ internal sealed class GeoJsonShape
         json.TryGetProperty(name, out JsonElement member) ? member : throw new UnusableException($"is not GeoJSON: \"{name}\" is missing");
 
     private static IEnumerable<JsonElement> Items(JsonElement json, string what) =>
-        json.ValueKind == JsonValueKind.Array ? json.EnumerateArray() : throw new UnusableException($"is not GeoJSON: {what} must be a list");
+        json.ValueKind == JsonValueKind.Array
+            ? json.EnumerateArray()
+            : throw new UnusableException($"is not GeoJSON: {what} must be a list");
 
     private sealed class UnusableException(string message) : Exception(message);
 }

@@ -36,11 +36,15 @@ internal static class PlaceChecks
     public static string ZoneHint(SiteContext site)
     {
         (Coordinate at, int _) = Each(site).FirstOrDefault(place => Math.Abs(place.At.X) <= 180 && Math.Abs(place.At.Y) <= 90);
-        return at is not null && CoordinateSystems.UtmSuggestion(at.X, at.Y) is { } zone ? $"; for {Words.Place(at.X, at.Y)} that is {zone}" : "";
+        return at is not null && CoordinateSystems.UtmSuggestion(at.X, at.Y) is { } zone
+            ? $"; for {Words.Place(at.X, at.Y)} that is {zone}"
+            : "";
     }
 
     private static IEnumerable<(Coordinate At, int Offset)> Each(SiteContext site) =>
-        site.Places.SelectMany(places => places.Points.Select((point, index) => (point, places.OffsetOf(index)))).OrderBy(place => place.Item2);
+        site.Places
+            .SelectMany(places => places.Points.Select((point, index) => (At: point, Offset: places.OffsetOf(index))))
+            .OrderBy(place => place.Offset);
 
     /// <summary>One warning for each value that holds a place far from the value that has most others near it.</summary>
     private static void WarnOfFar(SiteContext site, double farthest)
@@ -56,7 +60,8 @@ internal static class PlaceChecks
                 Coordinate far = places.Points[index];
                 site.Complaints.Warn(
                     places.OffsetOf(index),
-                    $"{Words.Place(far.X, far.Y)} lies more than 100 km from the rest of the site; are x and y swapped, or is a digit missing?");
+                    $"{Words.Place(far.X, far.Y)} lies more than 100 km from the rest of the site; "
+                    + "are x and y swapped, or is a digit missing?");
             }
         }
     }

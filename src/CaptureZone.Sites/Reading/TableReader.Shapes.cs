@@ -37,7 +37,9 @@ internal sealed partial class TableReader
 
         if (n[0] >= n[2] || n[1] >= n[3])
         {
-            Error(field.Key, $"{field.Key} is [xmin, ymin, xmax, ymax]: the first number must be below the third, the second below the fourth");
+            Error(
+                field.Key,
+                $"{field.Key} is [xmin, ymin, xmax, ymax]: the first number must be below the third, the second below the fourth");
             return null;
         }
 
@@ -120,7 +122,9 @@ internal sealed partial class TableReader
     private string Found(TomlNode node) => node is TomlArray ? Words.Short(site.Complaints.Source.Of(node)) : Words.KindOf(node);
 
     private static double[]? Numbers(TomlNode node, int count) =>
-        node is TomlArray list && list.Items.Length == count && list.Items.All(item => item is TomlNumber { Value: var v } && double.IsFinite(v))
+        node is TomlArray list
+        && list.Items.Length == count
+        && list.Items.All(item => item is TomlNumber { Value: var v } && double.IsFinite(v))
             ? [.. list.Items.Select(item => ((TomlNumber)item).Value)]
             : null;
 }

@@ -66,7 +66,8 @@ internal sealed partial class TableReader
             CheckNames(name, tables);
         }
 
-        return [.. tables.Select((inner, index) => new TableReader(site, inner, $"[[{name}]]", $"{name}.{NameOf(inner)?.Value ?? Words.Number(index + 1)}"))];
+        string PathOfItem(int index) => $"{PathOf(name)}.{NameOf(tables[index])?.Value ?? Words.Number(index + 1)}";
+        return [.. tables.Select((inner, index) => new TableReader(site, inner, $"[[{name}]]", PathOfItem(index)))];
     }
 
     /// <summary>Adds an error at a key, rather than at its value.</summary>
@@ -82,7 +83,9 @@ internal sealed partial class TableReader
             if (!first.TryAdd(name.Value, name))
             {
                 string line = Words.Number(site.Complaints.Source.PlaceOf(first[name.Value].Start).Line);
-                site.Complaints.Error(name.Start, $"the name {Words.Quote(name.Value)} is already taken on line {line}; every [[{kind}]] needs a name of its own");
+                site.Complaints.Error(
+                    name.Start,
+                    $"the name {Words.Quote(name.Value)} is already taken on line {line}; every [[{kind}]] needs a name of its own");
             }
         }
     }

@@ -11,7 +11,7 @@ namespace CaptureZone.Sites.Reading;
 /// </summary>
 /// <param name="site">What all readers share.</param>
 /// <param name="table">The table.</param>
-/// <param name="title">How the file writes the table's header, such as "[aquifer]"; "the site file" for what stands before all tables.</param>
+/// <param name="title">How the file writes the table's header, such as "[aquifer]"; "the site file" at the root.</param>
 /// <param name="path">The path of its values, such as "aquifer" or "well.RW-1"; empty at the root.</param>
 internal sealed partial class TableReader(SiteContext site, TomlTable table, string title, string path)
 {
@@ -141,7 +141,9 @@ internal sealed partial class TableReader(SiteContext site, TomlTable table, str
             case TomlDate { IsDateAlone: true } date:
                 return site.Complaints.Source.Of(date);
             case { } other:
-                Error(field.Key, $"{field.Key} must be a date without quotes, such as {field.Key} = {field.Example}; found {Words.KindOf(other)}");
+                Error(
+                    field.Key,
+                    $"{field.Key} must be a date without quotes, such as {field.Key} = {field.Example}; found {Words.KindOf(other)}");
                 return null;
         }
     }
@@ -250,7 +252,8 @@ internal sealed partial class TableReader(SiteContext site, TomlTable table, str
             case TomlNumber number:
                 string unit = field.Example[(field.Example.IndexOf(' ', StringComparison.Ordinal) + 1)..];
                 site.Complaints.Error(
-                    node.Start, $"{field.Key} lacks a unit; write \"{site.Complaints.Source.Of(number)} {unit}\", with the unit that it is in");
+                    node.Start,
+                    $"{field.Key} lacks a unit; write \"{site.Complaints.Source.Of(number)} {unit}\", with the unit that it is in");
                 return null;
             case TomlText text:
                 if (UnitTable.TryRead(text.Value, dimension, out double value, out string problem))
@@ -262,7 +265,8 @@ internal sealed partial class TableReader(SiteContext site, TomlTable table, str
                 return null;
             default:
                 site.Complaints.Error(
-                    node.Start, $"{field.Key} must be a quantity with its unit in quotes, such as \"{field.Example}\"; found {Words.KindOf(node)}");
+                    node.Start,
+                    $"{field.Key} must be a quantity with its unit in quotes, such as \"{field.Example}\"; found {Words.KindOf(node)}");
                 return null;
         }
     }

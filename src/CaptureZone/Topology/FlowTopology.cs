@@ -12,6 +12,12 @@ namespace CaptureZone.Topology;
 /// </summary>
 public sealed class FlowTopology
 {
+    /// <summary>Largest change of direction from vertex to vertex of a branch that is drawn coarsely, radians.</summary>
+    private const double Turn = 0.05;
+
+    /// <summary>Largest flow that a chord of such a branch cuts off, as a share of the total rate.</summary>
+    private const double CoarseLeak = 1e-6;
+
     private FlowTopology(Tracer tracer, ImmutableArray<DividingBranch> branches)
     {
         Tracer = tracer;
@@ -55,12 +61,20 @@ public sealed class FlowTopology
             launches.AddRange(of.Select((launch, order) => (i, order, launch)));
         }
 
+        double coarse = CoarseLeak * stops.TotalRate;
         DividingBranch[] branches = new DividingBranch[launches.Count];
         workers.For(branches.Length, i =>
         {
             cancel.ThrowIfCancellationRequested();
-            BranchRecorder recorder = new(stops, extent);
-            branches[i] = Follow(tracer, beside, launches[i].Saddle, launches[i].Order, launches[i].Launch, recorder);
+            branches[i] = Follow(tracer, beside, launches[i].Saddle, launches[i].Order, launches[i].Launch, coarse);
+        });
+        double[] fineness = BranchFineness.Of(stops, branches, extent);
+        workers.For(branches.Length, i =>
+        {
+            cancel.ThrowIfCancellationRequested();
+            branches[i] = fineness[i] < coarse
+                ? branches[i] with { Points = Vertices(tracer, branches[i], new BranchRecorder(extent, fineness[i], coarse)) }
+                : branches[i];
         });
         return new FlowTopology(tracer, [.. branches]);
     }
@@ -86,10 +100,11 @@ public sealed class FlowTopology
     /// passes by.
     /// </summary>
     private static DividingBranch Follow(
-        Tracer tracer, Tracer beside, int saddle, int order, Complex launch, BranchRecorder recorder)
+        Tracer tracer, Tracer beside, int saddle, int order, Complex launch, double coarse)
     {
         PathStops stops = tracer.Stops;
         bool stable = order % 2 != 0;
+        PathRecorder recorder = new(new PathResolution(Turn, coarse));
         Sense away = stable ? Sense.Upstream : Sense.Downstream;
         Sense back = stable ? Sense.Downstream : Sense.Upstream;
         PathEnd end = tracer.Trace(launch, away, double.PositiveInfinity, recorder, saddle);
@@ -102,6 +117,13 @@ public sealed class FlowTopology
                 stops.Field, stops.Stagnation.Points[saddle].At, launch, stops.TotalRate, side);
             return beside.Trace(companion, back, double.PositiveInfinity, null).Fate;
         }
+    }
+
+    private static ImmutableArray<PathPoint> Vertices(Tracer tracer, DividingBranch branch, BranchRecorder recorder)
+    {
+        Sense away = branch.IsStable ? Sense.Upstream : Sense.Downstream;
+        PathEnd end = tracer.Trace(branch.Launch, away, double.PositiveInfinity, recorder, branch.Saddle);
+        return Closed(tracer.Stops, branch.Saddle, recorder.ToPoints(), end);
     }
 
     /// <summary>Puts the stagnation point at the front, and the centre of what the branch ends in at the back.</summary>

@@ -3,6 +3,7 @@ using System.Numerics;
 using CaptureZone.Topology;
 using CaptureZone.Tracing;
 using NetTopologySuite.Geometries;
+using NetTopologySuite.Simplify;
 
 namespace CaptureZone.Zones;
 
@@ -18,20 +19,32 @@ internal static class ReportedPaths
     /// <summary>Largest flow that a chord cuts off, as a share of the total rate.</summary>
     private const double LeakShare = 1e-6;
 
+    /// <summary>Dividing streamlines are thinned out by as much as this share of the site's diameter.</summary>
+    private const double ThinShare = 1e-6;
+
     /// <summary>All reported paths.</summary>
     /// <param name="topology">The dividing streamlines.</param>
     /// <param name="plumes">The plumes.</param>
     internal static ImmutableArray<FlowPath> Of(FlowTopology topology, ImmutableArray<Plume> plumes) =>
     [
-        .. topology.Branches.Select(OfBranch),
+        .. topology.Branches.Select(branch => OfBranch(branch, ThinShare * topology.Stops.Diameter)),
         .. plumes.SelectMany(plume => StartsOn(plume).Select(start => OfPlume(topology, plume, start))),
     ];
 
-    private static FlowPath OfBranch(DividingBranch branch) =>
+    /// <summary>Drawn lines need fewer vertices than edges of zones, through which nothing may leak.</summary>
+    private static ImmutableArray<PathPoint> Thinned(ImmutableArray<PathPoint> points, double tolerance)
+    {
+        Coordinate[] kept = DouglasPeuckerLineSimplifier.Simplify(
+            [.. points.Select(point => GeometryKit.ToCoordinate(point.At))], tolerance);
+        int next = 0;
+        return [.. points.Where(point => next < kept.Length && kept[next].Equals2D(GeometryKit.ToCoordinate(point.At)) && next++ >= 0)];
+    }
+
+    private static FlowPath OfBranch(DividingBranch branch, double tolerance) =>
         new(
             branch.IsStable ? PathRole.DividesDestinations : PathRole.DividesOrigins,
             "",
-            branch.Points,
+            Thinned(branch.Points, tolerance),
             branch.End.Fate,
             branch.End.Length);
 

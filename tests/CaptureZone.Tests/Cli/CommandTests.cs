@@ -261,12 +261,13 @@ public sealed class CommandTests : IDisposable
     public void A_stopped_run_gives_the_code_of_what_stopped_it_and_leaves_nothing(int code)
     {
         Interruption interruption = new();
-        CliSetting stopped = With((_, _, _, _, cancel) =>
+        Analysis stopping = (_, _, _, _, cancel) =>
         {
             interruption.Stop(code);
             cancel.ThrowIfCancellationRequested();
             return _sample.Answers;
-        }) with { Interruption = interruption };
+        };
+        CliSetting stopped = With(stopping) with { Interruption = interruption };
         CliRun run = CliRun.With(stopped, "run", _temp.Write("a.toml", Site));
         Assert.Equal((code, "", "capturezone: error: stopped; nothing was written\n"), (run.Code, run.Output, run.Error));
         Assert.Equal(["a.toml"], _temp.Entries);
@@ -279,7 +280,10 @@ public sealed class CommandTests : IDisposable
         CliSetting broken = With((_, _, _, _, _) => throw new InvalidOperationException("zone without a face"));
         CliRun run = CliRun.With(broken, "run", site), traced = CliRun.With(broken, "run", site, "--trace");
         Assert.Equal((1, ""), (run.Code, run.Output));
-        Assert.StartsWith("capturezone: error: a defect inside the program (InvalidOperationException: zone without a face)", run.Error, StringComparison.Ordinal);
+        Assert.StartsWith(
+            "capturezone: error: a defect inside the program (InvalidOperationException: zone without a face)",
+            run.Error,
+            StringComparison.Ordinal);
         Assert.Contains("Please report it", run.Error, StringComparison.Ordinal);
         Assert.DoesNotContain("   at ", run.Error, StringComparison.Ordinal);
         Assert.Contains("   at ", traced.Error, StringComparison.Ordinal);

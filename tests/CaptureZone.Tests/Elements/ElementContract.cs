@@ -358,7 +358,12 @@ public abstract class ElementContract<T>
         double[][] parts = [.. Parts.Select(_ => new double[x.Length])];
         FlowBlock block = new()
         {
-            Potential = parts[0], Qx = parts[1], Qy = parts[2], Qxx = parts[3], Qxy = parts[4], Qyy = parts[5],
+            Potential = parts[0],
+            Qx = parts[1],
+            Qy = parts[2],
+            Qxx = parts[3],
+            Qxy = parts[4],
+            Qyy = parts[5],
         };
         for (int start = 0; start < x.Length; start += piece)
         {

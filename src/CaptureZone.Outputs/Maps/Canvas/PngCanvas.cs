@@ -1,32 +1,43 @@
+using System.Runtime.InteropServices;
 using SkiaSharp;
 
 namespace CaptureZone.Outputs.Maps;
 
 /// <summary>Draws into pixels, one per unit of the sheet.</summary>
-internal sealed class PngCanvas : IMapCanvas, IDisposable
+/// <param name="width">Pixels per row.</param>
+/// <param name="height">Rows.</param>
+internal sealed class PngCanvas(int width, int height) : IMapCanvas, IDisposable
 {
-    private readonly SKSurface _surface;
+    /// <summary>Rows that are in memory at a time: a whole sheet would take 29 MB, and most of the time to get hold of them.</summary>
+    private const int BandHeight = 128;
 
-    /// <summary>Begins a blank sheet.</summary>
-    /// <param name="width">Pixels.</param>
-    /// <param name="height">Pixels.</param>
-    public PngCanvas(int width, int height)
-    {
-        _surface = SKSurface.Create(new SKImageInfo(width, height, SKColorType.Rgba8888, SKAlphaType.Opaque));
-        _surface.Canvas.Clear(Look.Paper);
-    }
+    private readonly SKPictureRecorder _recorder = new();
+    private SKCanvas? _canvas;
 
-    private SKCanvas Canvas => _surface.Canvas;
+    private SKCanvas Canvas => _canvas ??= _recorder.BeginRecording(SKRect.Create(width, height), useRTree: true);
 
-    /// <summary>The picture as a PNG file.</summary>
+    /// <summary>The picture as a PNG file; nothing can be drawn after.</summary>
     public byte[] ToFile()
     {
-        using SKPixmap pixels = _surface.PeekPixels();
-        return PngFile.Write(pixels.GetPixelSpan<byte>(), pixels.Width, pixels.Height);
+        _ = Canvas;
+        using SKPicture picture = _recorder.EndRecording();
+        using SKBitmap band = new(new SKImageInfo(width, BandHeight, SKColorType.Rgba8888, SKAlphaType.Opaque));
+        using SKCanvas pixels = new(band);
+        PngFile file = new(width, height, Look.FlatColors);
+        for (int top = 0; top < height; top += BandHeight)
+        {
+            pixels.ResetMatrix();
+            pixels.Clear(Look.Paper);
+            pixels.Translate(0, -top);
+            pixels.DrawPicture(picture);
+            file.Add(MemoryMarshal.Cast<byte, uint>(band.GetPixelSpan())[..(width * Math.Min(BandHeight, height - top))]);
+        }
+
+        return file.ToArray();
     }
 
     /// <inheritdoc/>
-    public void Dispose() => _surface.Dispose();
+    public void Dispose() => _recorder.Dispose();
 
     /// <inheritdoc/>
     public void Layer(string name)

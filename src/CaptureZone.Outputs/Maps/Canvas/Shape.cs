@@ -27,6 +27,12 @@ internal sealed record Shape(IReadOnlyList<Trace> Traces)
     public static Shape Rectangle(SKRect area) => Polygon(
         new(area.Left, area.Top), new(area.Right, area.Top), new(area.Right, area.Bottom), new(area.Left, area.Bottom));
 
+    /// <summary>An upright square.</summary>
+    /// <param name="centre">Its centre.</param>
+    /// <param name="halfSide">Half of its side.</param>
+    public static Shape Square(SKPoint centre, float halfSide) =>
+        Rectangle(new(centre.X - halfSide, centre.Y - halfSide, centre.X + halfSide, centre.Y + halfSide));
+
     /// <summary>A circle.</summary>
     /// <param name="centre">Its centre.</param>
     /// <param name="radius">Its radius.</param>
@@ -68,7 +74,11 @@ internal sealed record Shape(IReadOnlyList<Trace> Traces)
                 SKRect point = new(p.X, p.Y, p.X, p.Y);
                 bounds = bounds == SKRect.Empty
                     ? point
-                    : new(MathF.Min(bounds.Left, p.X), MathF.Min(bounds.Top, p.Y), MathF.Max(bounds.Right, p.X), MathF.Max(bounds.Bottom, p.Y));
+                    : new(
+                        MathF.Min(bounds.Left, p.X),
+                        MathF.Min(bounds.Top, p.Y),
+                        MathF.Max(bounds.Right, p.X),
+                        MathF.Max(bounds.Bottom, p.Y));
             }
 
             return bounds;

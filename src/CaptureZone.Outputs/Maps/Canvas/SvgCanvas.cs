@@ -29,7 +29,8 @@ internal sealed class SvgCanvas(int width, int height, string title) : IMapCanva
         file.Append(
             CultureInfo.InvariantCulture,
             $"""
-            <svg xmlns="http://www.w3.org/2000/svg" xmlns:xlink="http://www.w3.org/1999/xlink" width="{width}" height="{height}" viewBox="0 0 {Fineness * width} {Fineness * height}">
+            <svg xmlns="http://www.w3.org/2000/svg" xmlns:xlink="http://www.w3.org/1999/xlink"
+              width="{width}" height="{height}" viewBox="0 0 {Fineness * width} {Fineness * height}">
             <title>{SecurityElement.Escape(title)}</title>
             <defs>
 
@@ -90,7 +91,8 @@ internal sealed class SvgCanvas(int width, int height, string title) : IMapCanva
         string glyphs = Glyphs(text.Text, style, face);
         if (style.Halo)
         {
-            _body.Append("<g fill=\"none\"").Append(Line(Look.Paper, Fineness * Look.HaloWidth / scale)).Append('>').Append(glyphs).Append("</g>\n");
+            string halo = Line(Look.Paper, Fineness * Look.HaloWidth / scale);
+            _body.Append("<g fill=\"none\"").Append(halo).Append('>').Append(glyphs).Append("</g>\n");
         }
 
         _body.Append("<g").Append(Paint("fill", style.Color)).Append('>').Append(glyphs).Append("</g>\n</g>\n");
@@ -100,7 +102,8 @@ internal sealed class SvgCanvas(int width, int height, string title) : IMapCanva
     public void Clipped(Shape within, Action draw)
     {
         int id = ++_clips;
-        _body.Append(CultureInfo.InvariantCulture, $"<clipPath id=\"c{id}\"><path clip-rule=\"evenodd\" d=\"{Data(within)}\"/></clipPath>\n");
+        _body.Append(CultureInfo.InvariantCulture, $"<clipPath id=\"c{id}\"><path clip-rule=\"evenodd\" d=\"");
+        _body.Append(Data(within)).Append("\"/></clipPath>\n");
         _body.Append(CultureInfo.InvariantCulture, $"<g clip-path=\"url(#c{id})\">\n");
         draw();
         _body.Append("</g>\n");

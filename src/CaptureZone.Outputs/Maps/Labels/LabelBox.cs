@@ -9,7 +9,7 @@ namespace CaptureZone.Outputs.Maps;
 /// <param name="Angle">Degrees clockwise.</param>
 internal readonly record struct LabelBox(SKPoint Centre, float HalfWidth, float HalfHeight, float Angle)
 {
-    private SKPoint Along => Shape.Polar(1, Angle * MathF.PI / 180);
+    private SKPoint Along { get; } = Shape.Polar(1, Angle * MathF.PI / 180);
 
     private SKPoint Across => new(-Along.Y, Along.X);
 

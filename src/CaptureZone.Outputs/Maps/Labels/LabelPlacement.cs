@@ -20,17 +20,19 @@ internal sealed record LabelPlacement(
     /// <param name="symbols">What they may not cover.</param>
     /// <param name="heavyLines">What they cover only where nothing else is free beside their thing.</param>
     /// <param name="requests">The labels, most important first.</param>
-    public static LabelPlacement Of(SKRect area, IReadOnlyList<LabelBox> symbols, IReadOnlyList<LabelBox> heavyLines, IEnumerable<LabelRequest> requests)
+    public static LabelPlacement Of(
+        SKRect area, IReadOnlyList<LabelBox> symbols, IReadOnlyList<LabelBox> heavyLines, IEnumerable<LabelRequest> requests)
     {
         List<LabelBox> taken = [.. symbols];
         List<PlacedLabel> labels = [];
         List<LabelRequest> leftOut = [];
         foreach (LabelRequest request in requests)
         {
-            PlacedLabel? found = Find(request, area, taken, BesideAndClear);
+            IEnumerable<PlacedLabel> all = request.Spots.Select(spot => new PlacedLabel(request.Block, spot));
+            PlacedLabel? found = Find(all.Where(label => label.Leader is null), Clear);
             if (!request.Optional)
             {
-                found ??= Find(request, area, taken, LeaderClear) ?? Find(request, area, taken, _ => true);
+                found ??= Find(all, LeaderClear) ?? Find(all, _ => true);
             }
 
             if (found is { } label)
@@ -50,7 +52,10 @@ internal sealed record LabelPlacement(
 
         return new([.. labels], [.. leftOut], [.. taken]);
 
-        bool BesideAndClear(PlacedLabel label) => label.Leader is null && Free(label.Box, heavyLines);
+        PlacedLabel? Find(IEnumerable<PlacedLabel> spots, Func<PlacedLabel, bool> suits) =>
+            spots.FirstOrDefault(label => label.Box.Within(area) && Free(label.Box.Grown(Gap), taken) && suits(label));
+
+        bool Clear(PlacedLabel label) => Free(label.Box, heavyLines);
 
         bool LeaderClear(PlacedLabel label) =>
             label.Leader is not { } leader || Free(LabelBox.Around(leader.From, leader.To, LeaderClearance), taken);
@@ -72,20 +77,6 @@ internal sealed record LabelPlacement(
         {
             canvas.Write(text);
         }
-    }
-
-    private static PlacedLabel? Find(LabelRequest request, SKRect area, List<LabelBox> taken, Func<PlacedLabel, bool> suits)
-    {
-        foreach (LabelSpot spot in request.Spots)
-        {
-            PlacedLabel label = new(request.Block, spot);
-            if (label.Box.Within(area) && Free(label.Box.Grown(Gap), taken) && suits(label))
-            {
-                return label;
-            }
-        }
-
-        return null;
     }
 
     private static bool Free(LabelBox box, IReadOnlyList<LabelBox> taken)

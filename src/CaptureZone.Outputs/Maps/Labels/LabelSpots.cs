@@ -8,8 +8,8 @@ internal static class LabelSpots
     /// <summary>Steps outward when the places beside a thing are taken, units of the sheet.</summary>
     private const float RingStep = 32;
 
-    /// <summary>No label is farther from its thing than the sheet is wide.</summary>
-    private const int Rings = (int)(Look.SheetWidth / RingStep);
+    /// <summary>How far a label may move away: a longer leader is not followed by the eye.</summary>
+    private const int Rings = (int)(Look.LongestLeader / RingStep);
 
     private const int Directions = 24;
 
@@ -23,7 +23,8 @@ internal static class LabelSpots
     private const float StraightEnough = 0.97f;
 
     /// <summary>Right and above first, as map readers expect (common practice, no source).</summary>
-    private static readonly SKPoint[] Beside = [new(1, -1), new(1, 0), new(1, 1), new(-1, -1), new(-1, 0), new(-1, 1), new(0, -1), new(0, 1)];
+    private static readonly SKPoint[] Beside =
+        [new(1, -1), new(1, 0), new(1, 1), new(-1, -1), new(-1, 0), new(-1, 1), new(0, -1), new(0, 1)];
 
     /// <summary>Round a point: beside it, then farther and farther away with a leader.</summary>
     /// <param name="at">The point.</param>
@@ -46,7 +47,8 @@ internal static class LabelSpots
                 float gap = clearance + ring * RingStep;
                 SKPoint centre = at + new SKPoint(way.X * (gap + block.HalfWidth), way.Y * (gap + block.HalfHeight));
                 SKPoint toward = block.At(new LabelSpot(centre)).Nearest(at) - at;
-                yield return new LabelSpot(centre, 0, at + Shape.Polar(clearance, MathF.Atan2(toward.Y, toward.X)), MathF.Sign(MathF.Round(way.X)));
+                SKPoint leaderFrom = at + Shape.Polar(clearance, MathF.Atan2(toward.Y, toward.X));
+                yield return new LabelSpot(centre, 0, leaderFrom, MathF.Sign(MathF.Round(way.X)));
             }
         }
     }

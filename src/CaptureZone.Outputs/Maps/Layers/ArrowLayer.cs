@@ -46,7 +46,11 @@ internal sealed class ArrowLayer : IMapLayer
     /// <inheritdoc/>
     public IEnumerable<LegendItem> Legend => _arrows.Count == 0
         ? []
-        : [new("Direction of flow, longer where it is stronger", (canvas, area) => Draw(canvas, new(area.Left, area.MidY), new(area.Right, area.MidY)))];
+        :
+        [
+            new("Direction of flow, longer where it is stronger", (canvas, area) =>
+                Draw(canvas, new(area.Left, area.MidY), new(area.Right, area.MidY))),
+        ];
 
     /// <inheritdoc/>
     public void Draw(IMapCanvas canvas)
@@ -57,7 +61,9 @@ internal sealed class ArrowLayer : IMapLayer
         }
     }
 
-    /// <summary>Grows with the square root, so that flow near a well does not dwarf all other; the usual strength lies a third up.</summary>
+    /// <summary>
+    /// Grows with the square root, so that flow near a well does not dwarf all other; the usual strength lies a third up.
+    /// </summary>
     private static float Length(double strength) =>
         Math.Clamp((float)Math.Sqrt(strength) * (2 * Look.ShortestArrow + Look.LongestArrow) / 3, Look.ShortestArrow, Look.LongestArrow);
 

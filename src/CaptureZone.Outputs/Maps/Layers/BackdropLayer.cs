@@ -56,7 +56,10 @@ internal sealed class BackdropLayer : IMapLayer
             foreach ((string name, Shape lines, IReadOnlyList<SKPoint> points) in _items)
             {
                 LabelBlock block = LabelBlock.Of(name, NameStyle);
-                yield return new LabelRequest(block, [.. lines.Traces.SelectMany(trace => OnLine(trace, block)), .. points.SelectMany(at => LabelSpots.Around(at, Clearance, block))]);
+                yield return new LabelRequest(
+                    block,
+                    lines.Traces.SelectMany(trace => OnLine(trace, block))
+                        .Concat(points.SelectMany(at => LabelSpots.Around(at, Clearance, block))));
             }
         }
     }
@@ -69,7 +72,7 @@ internal sealed class BackdropLayer : IMapLayer
             canvas.Stroke(lines, Look.BackdropPen);
             foreach (SKPoint at in points)
             {
-                canvas.Fill(Shape.Rectangle(new(at.X - HalfSquare, at.Y - HalfSquare, at.X + HalfSquare, at.Y + HalfSquare)), Look.Backdrop);
+                canvas.Fill(Shape.Square(at, HalfSquare), Look.Backdrop);
             }
         }
     }

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.Globalization;
 using CaptureZone.Sites;
 using SkiaSharp;
@@ -16,10 +17,20 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
 
     private const int MostDecimals = 4;
 
+    /// <summary>For an interval that no number of decimals gives exactly.</summary>
+    private const int UsualDecimals = 2;
+
     /// <summary>A line is at a round multiple of the interval when it is nearer than this share of it.</summary>
     private const double Nearly = 1e-6;
 
     private static readonly TextStyle ValueStyle = new(Look.SmallSize, Look.Head, Halo: true);
+
+    private readonly ImmutableArray<(double Head, Shape Lines)> _contours =
+    [
+        .. scene.Answers.Contours.Select(contour => (
+            scene.Print.In(QuantityKind.Length, contour.Head),
+            new Shape([.. contour.Lines.SelectMany(line => scene.View.Line(line).Traces)]))),
+    ];
 
     private readonly double _interval = scene.Print.In(QuantityKind.Length, scene.Answers.ContourInterval);
 
@@ -32,7 +43,7 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
         get
         {
             string unit = scene.Print.Unit(QuantityKind.Length);
-            return scene.Answers.Contours.Length == 0
+            return _contours.Length == 0
                 ? []
                 : [LegendItem.Line($"Predicted head, elevation in {unit}; interval {Text(_interval)} {unit}", Look.HeadPen)];
         }
@@ -43,10 +54,10 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
     {
         get
         {
-            foreach (HeadContour contour in scene.Answers.Contours)
+            foreach ((double head, Shape lines) in _contours)
             {
-                LabelBlock block = LabelBlock.Of(Text(scene.Print.In(QuantityKind.Length, contour.Head)), ValueStyle);
-                foreach (IReadOnlyList<SKPoint> part in Shapes(contour).Traces.SelectMany(trace => Stretches(trace.Points)))
+                LabelBlock block = LabelBlock.Of(Text(head), ValueStyle);
+                foreach (IReadOnlyList<SKPoint> part in lines.Traces.SelectMany(trace => Stretches(trace.Points)))
                 {
                     SKPoint middle = LabelSpots.PointAt(part, LabelSpots.Length(part) / 2);
                     yield return new LabelRequest(
@@ -59,11 +70,11 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
     /// <inheritdoc/>
     public void Draw(IMapCanvas canvas)
     {
-        foreach (HeadContour contour in scene.Answers.Contours)
+        foreach ((double head, Shape lines) in _contours)
         {
-            double order = scene.Print.In(QuantityKind.Length, contour.Head) / (IndexEvery * _interval);
+            double order = head / (IndexEvery * _interval);
             bool index = Math.Abs(order - Math.Round(order)) < Nearly * Math.Max(1, Math.Abs(order));
-            canvas.Stroke(Shapes(contour), index ? Look.IndexHeadPen : Look.HeadPen);
+            canvas.Stroke(lines, index ? Look.IndexHeadPen : Look.HeadPen);
         }
     }
 
@@ -74,12 +85,10 @@ internal sealed class ContourLayer(MapScene scene) : IMapLayer
         return Enumerable.Range(0, count).Select(i => LabelSpots.Part(line, i * length / count, (i + 1) * length / count));
     }
 
-    private Shape Shapes(HeadContour contour) => new([.. contour.Lines.SelectMany(line => scene.View.Line(line).Traces)]);
-
     /// <summary>As many decimals as the interval has.</summary>
     private string Text(double value)
     {
-        int decimals = Enumerable.Range(0, MostDecimals).FirstOrDefault(IsEnough, MostDecimals);
+        int decimals = Enumerable.Range(0, MostDecimals + 1).FirstOrDefault(IsEnough, UsualDecimals);
         return value.ToString(string.Create(CultureInfo.InvariantCulture, $"F{decimals}"), CultureInfo.InvariantCulture);
     }
 

@@ -8,14 +8,26 @@ internal sealed class PathLayer(MapScene scene) : IMapLayer
 {
     private static readonly (PathRole Role, Pen Pen, string Text)[] Kinds =
     [
-        (PathRole.FromPlume, Look.PlumePathPen, "Path of plume water"),
+        (PathRole.FromPlume, Look.PlumePathPen, "Path of plume water, a selection"),
         (PathRole.DividesDestinations, Look.DestinationsPen, "Dividing streamline: bounds where water goes to"),
         (PathRole.DividesOrigins, Look.OriginsPen, "Dividing streamline: bounds where water comes from"),
     ];
 
-    private readonly Dictionary<PathRole, Shape> _shapes = scene.Answers.Paths.GroupBy(path => path.Role).ToDictionary(
+    /// <summary>More paths than this from one plume hide it.</summary>
+    private const int MostPerPlume = 8;
+
+    private readonly Dictionary<PathRole, Shape> _shapes = Chosen(scene.Answers.Paths).GroupBy(path => path.Role).ToDictionary(
         group => group.Key,
         group => new Shape([.. group.SelectMany(path => scene.View.Line([.. path.Points.Select(point => point.At)]).Traces)]));
+
+    /// <summary>All dividing streamlines; of each plume's paths some, evenly spread.</summary>
+    private static IEnumerable<FlowPath> Chosen(IEnumerable<FlowPath> paths) =>
+        paths.GroupBy(path => (path.Role, path.From)).SelectMany(group =>
+        {
+            FlowPath[] all = [.. group];
+            int every = group.Key.Role == PathRole.FromPlume ? (all.Length + MostPerPlume - 1) / MostPerPlume : 1;
+            return all.Where((_, i) => i % every == 0);
+        });
 
     /// <inheritdoc/>
     public string Name => "paths";

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using CaptureZone.Zones;
 using SkiaSharp;
 
 namespace CaptureZone.Outputs.Maps;
@@ -10,31 +9,36 @@ internal sealed class TravelTimeLayer(MapScene scene) : IMapLayer
 {
     private static readonly TextStyle TimeStyle = new(Look.SmallSize, Look.TravelTime, Bold: true, Halo: true);
 
+    private readonly ImmutableArray<(int Well, ImmutableArray<Shape> Outlines)> _wells =
+    [
+        .. scene.Answers.Wells.Select(answer =>
+            (answer.Well, answer.TravelTimeZones.Select(zone => scene.View.Lines(zone.Polygon)).ToImmutableArray())),
+    ];
+
     private ImmutableArray<string> Times => scene.Report.Site.TravelTimeLabels;
 
     /// <inheritdoc/>
     public string Name => "travel-time-zones";
 
     /// <inheritdoc/>
-    public IEnumerable<LegendItem> Legend => scene.Answers.Wells.All(well => well.TravelTimeZones.IsEmpty)
+    public IEnumerable<LegendItem> Legend => _wells.All(well => well.Outlines.IsEmpty)
         ? []
-        : Times.Select((time, i) => LegendItem.Line($"Water reaches the well within {time}", Look.TravelTimePen(i)));
+        : Times.Select((time, i) => LegendItem.Line($"Travel-time zone, {time}", Look.TravelTimePen(i)));
 
     /// <summary>At the end of each zone that is farthest from its well: there the times stand farthest apart.</summary>
     public IEnumerable<LabelRequest> Labels
     {
         get
         {
-            foreach (WellAnswer answer in scene.Answers.Wells)
+            foreach ((int index, ImmutableArray<Shape> outlines) in _wells)
             {
-                SKPoint well = scene.View.At(scene.Model.Wells[answer.Well].At);
-                for (int i = 0; i < answer.TravelTimeZones.Length; i++)
+                SKPoint well = scene.View.At(scene.Model.Wells[index].At);
+                for (int i = 0; i < outlines.Length; i++)
                 {
                     LabelBlock block = LabelBlock.Of(Times[i], TimeStyle);
                     yield return new LabelRequest(
                         block,
-                        scene.View.Lines(answer.TravelTimeZones[i].Polygon).Traces
-                            .SelectMany(trace => LabelSpots.Along(trace.Points, block, at => -SKPoint.Distance(at, well))),
+                        outlines[i].Traces.SelectMany(trace => LabelSpots.Along(trace.Points, block, at => -SKPoint.Distance(at, well))),
                         Optional: true);
                 }
             }
@@ -44,11 +48,11 @@ internal sealed class TravelTimeLayer(MapScene scene) : IMapLayer
     /// <inheritdoc/>
     public void Draw(IMapCanvas canvas)
     {
-        foreach (ImmutableArray<TravelTimeZone> zones in scene.Answers.Wells.Select(well => well.TravelTimeZones))
+        foreach ((_, ImmutableArray<Shape> outlines) in _wells)
         {
-            for (int i = 0; i < zones.Length; i++)
+            for (int i = 0; i < outlines.Length; i++)
             {
-                canvas.Stroke(scene.View.Lines(zones[i].Polygon), Look.TravelTimePen(i));
+                canvas.Stroke(outlines[i], Look.TravelTimePen(i));
             }
         }
     }

@@ -75,9 +75,11 @@ internal static class WellSymbols
 
     private static Shape Outline(WellSymbol symbol, SKPoint at) => symbol switch
     {
-        WellSymbol.Supply => Shape.Rectangle(SKRect.Create(at.X - 0.9f * Radius, at.Y - 0.9f * Radius, 1.8f * Radius, 1.8f * Radius)),
+        WellSymbol.Supply => Shape.Square(at, 0.9f * Radius),
         WellSymbol.Injection => Shape.Polygon(
-            new(at.X, at.Y - 1.3f * Radius), new(at.X + 1.2f * Radius, at.Y + 0.85f * Radius), new(at.X - 1.2f * Radius, at.Y + 0.85f * Radius)),
+            new(at.X, at.Y - 1.3f * Radius),
+            new(at.X + 1.2f * Radius, at.Y + 0.85f * Radius),
+            new(at.X - 1.2f * Radius, at.Y + 0.85f * Radius)),
         WellSymbol.Idle => Shape.Circle(at, 0.7f * Radius),
         _ => Shape.Circle(at, Radius),
     };

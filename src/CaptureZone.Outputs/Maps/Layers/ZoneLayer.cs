@@ -1,6 +1,7 @@
 using CaptureZone.Elements.Wells;
 using CaptureZone.Zones;
 using NetTopologySuite.Geometries;
+using NetTopologySuite.Operation.Distance;
 using SkiaSharp;
 
 namespace CaptureZone.Outputs.Maps;
@@ -27,7 +28,7 @@ internal sealed class ZoneLayer : IMapLayer
             bool containment = scene.Model.Wells[answer.Well].Purpose == WellPurpose.Containment;
             HashSet<int> used =
             [
-                .. _zones.Where(other => other.Containment == containment && other.Polygon.IsWithinDistance(zone.InExtent, touching))
+                .. _zones.Where(other => other.Containment == containment && Touch(other.Polygon, zone.InExtent, touching))
                     .Select(other => other.Tint),
             ];
             int tints = Look.Tints(containment).Length;
@@ -69,6 +70,9 @@ internal sealed class ZoneLayer : IMapLayer
             canvas.Stroke(zone.Edge, EdgePen(zone.Containment));
         }
     }
+
+    private static bool Touch(Geometry a, Geometry b, double distance) =>
+        !a.IsEmpty && !b.IsEmpty && IndexedFacetDistance.IsWithinDistance(a, b, distance);
 
     private static Pen EdgePen(bool containment) => containment ? Look.ContainmentZonePen : Look.SupplyZonePen;
 

@@ -21,7 +21,10 @@ internal static class MapNotes
         yield return settings.VerticalDatum.Length > 0 ? $"Vertical datum: {settings.VerticalDatum}" : "Vertical datum not given";
         (string Label, string Text)[] given =
         [
-            ("Project", settings.Project), ("Prepared for", settings.PreparedFor), ("Prepared by", settings.PreparedBy), ("Date", settings.Date),
+            ("Project", settings.Project),
+            ("Prepared for", settings.PreparedFor),
+            ("Prepared by", settings.PreparedBy),
+            ("Date", settings.Date),
             ("Not in the frame", Names([.. scene.Model.Wells.Where(well => !scene.View.Shows(well.At)).Select(well => well.Name)])),
             ("Names without room", Names([.. placement.LeftOut.Select(label => label.Block.Lines[0].Text)])),
         ];

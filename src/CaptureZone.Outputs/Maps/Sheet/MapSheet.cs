@@ -20,6 +20,7 @@ internal sealed class MapSheet
     private const float PanelGap = 50;
     private const float SidePanelWidth = 700;
     private const int ColumnsBelow = 3;
+    private const int NoteColumns = 2;
 
     /// <summary>Labels keep this far from the frame, units of the sheet.</summary>
     private const float FrameClearance = 20;
@@ -70,10 +71,7 @@ internal sealed class MapSheet
 
         IMapLayer[] explained = [wells, joint, zones, times, plumes, stagnation, paths, contours, arrows, backdrop];
         LegendItem[] legend = [.. explained.SelectMany(layer => layer.Legend)];
-        SKRect panel = below
-            ? new(left, View.Area.Bottom + PlanFrame.Room + PanelGap, right, 0)
-            : new(planRight + PanelGap, TitleBottom, right, 0);
-        _panel = [.. Panel(scene, legend, panel, below ? ColumnsBelow : 1)];
+        _panel = [.. below ? PanelBelow(scene, legend, left, right) : PanelBeside(scene, legend, left, planRight, right)];
         float bottom = MathF.Max(
             View.Area.Bottom + PlanFrame.Room, _panel.Max(piece => piece.At.Y + piece.Block.Height));
         _cautionTop = bottom + PanelGap;
@@ -132,32 +130,46 @@ internal sealed class MapSheet
         return shown;
     }
 
-    /// <summary>The blocks of legend and notes in their places; with several columns the notes have the last.</summary>
-    private IEnumerable<(PanelBlock Block, SKPoint At)> Panel(MapScene scene, LegendItem[] legend, SKRect area, int columns)
+    /// <summary>Legend in all columns but the last, which has the notes.</summary>
+    private IEnumerable<(PanelBlock Block, SKPoint At)> PanelBelow(MapScene scene, LegendItem[] legend, float left, float right)
     {
-        float width = (area.Width - (columns - 1) * PanelGap) / columns;
-        PanelBlock[] items = [PanelBlock.Heading("Legend"), .. legend.Select(item => PanelBlock.Of(item, width))];
-        float perColumn = items.Sum(block => block.Height) / Math.Max(1, columns - 1);
-        SKPoint at = area.Location;
-        foreach (PanelBlock block in items)
-        {
-            yield return (block, at);
-            at.Y += block.Height;
-            if (columns > 1 && at.Y - area.Top >= perColumn)
-            {
-                at = new(at.X + width + PanelGap, area.Top);
-            }
-        }
-
-        at = columns > 1 ? new(area.Right - width, area.Top) : new(at.X, at.Y + PanelGap);
-        foreach (PanelBlock block in (PanelBlock[])[ScaleBlock.Of(View, width), .. Notes(scene).Select(note => PanelBlock.Note(note, width))])
-        {
-            yield return (block, at);
-            at.Y += block.Height;
-        }
+        float width = ColumnWidth(right - left, ColumnsBelow);
+        SKPoint at = new(left, View.Area.Bottom + PlanFrame.Room + PanelGap), notes = new(right - width, at.Y);
+        return [.. Flow(Legend(legend, width), at, width, ColumnsBelow - 1), .. Flow(Notes(scene, width), notes, width, 1)];
     }
 
-    private IEnumerable<string> Notes(MapScene scene) => MapNotes.Of(scene, Placement);
+    /// <summary>Legend beside the plan, notes below it.</summary>
+    private IEnumerable<(PanelBlock Block, SKPoint At)> PanelBeside(
+        MapScene scene, LegendItem[] legend, float left, float planRight, float right)
+    {
+        SKPoint at = new(planRight + PanelGap, TitleBottom), notes = new(left, View.Area.Bottom + PlanFrame.Room + PanelGap / 2);
+        float width = ColumnWidth(planRight - left, NoteColumns);
+        return [.. Flow(Legend(legend, right - at.X), at, right - at.X, 1), .. Flow(Notes(scene, width), notes, width, NoteColumns)];
+    }
+
+    private static float ColumnWidth(float width, int columns) => (width - (columns - 1) * PanelGap) / columns;
+
+    private static PanelBlock[] Legend(LegendItem[] items, float width) =>
+        [PanelBlock.Heading("Legend"), .. items.Select(item => PanelBlock.Of(item, width))];
+
+    private PanelBlock[] Notes(MapScene scene, float width) =>
+        [ScaleBlock.Of(View, width), .. MapNotes.Of(scene, Placement).Select(note => PanelBlock.Note(note, width))];
+
+    /// <summary>Blocks in columns of about the same height.</summary>
+    private static IEnumerable<(PanelBlock Block, SKPoint At)> Flow(PanelBlock[] blocks, SKPoint start, float width, int columns)
+    {
+        float perColumn = blocks.Sum(block => block.Height) / columns;
+        SKPoint at = start;
+        foreach (PanelBlock block in blocks)
+        {
+            yield return (block, at);
+            at.Y += block.Height;
+            if (columns > 1 && at.Y - start.Y >= perColumn)
+            {
+                at = new(at.X + width + PanelGap, start.Y);
+            }
+        }
+    }
 
     private void DrawTitle(IMapCanvas canvas)
     {

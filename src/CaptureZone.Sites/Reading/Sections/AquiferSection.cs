@@ -11,6 +11,7 @@ internal static class AquiferSection
 
     private static readonly Field Transmissivity = new("transmissivity", "Transmissivity", "216 m2/d") { Limit = Limit.Positive };
     private static readonly Field Base = new("base", "Base of the aquifer", "212 m") { Required = true };
+    private static readonly Field Thick = new("thickness", "", "12 m") { Usual = UsualRange.Thickness };
     private static readonly Field Top = new("top", "Top of the aquifer", "224 m");
 
     private static readonly Field Porosity =
@@ -45,7 +46,7 @@ internal static class AquiferSection
             return null;
         }
 
-        table.WarnIfUnusual(new Field("thickness", "", "12 m") { Usual = UsualRange.Thickness }, table.PlaceOf("top"), t - b, $"{Words.Number(t - b)} m");
+        table.WarnIfUnusual(Thick, table.PlaceOf("top"), t - b, $"top - base = {Words.Number(t - b)} m");
         return t - b;
     }
 
@@ -61,7 +62,10 @@ internal static class AquiferSection
         }
         else if (table.Has("transmissivity") && !table.Has("top"))
         {
-            table.Error("transmissivity", "transmissivity needs a top, since conductivity = transmissivity / (top - base); add top, or give conductivity");
+            table.Error(
+                "transmissivity",
+                "transmissivity needs a top, since conductivity = transmissivity / (top - base); "
+                + "add top, or give conductivity");
         }
     }
 

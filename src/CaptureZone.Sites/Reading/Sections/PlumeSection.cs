@@ -15,7 +15,8 @@ internal static class PlumeSection
     private static readonly Field Name = new("name", "", "Cr(VI) above 50 ug/L") { Required = true };
     private static readonly Field Outline = new("outline", "Plume outline", "[[x, y], [x, y], [x, y]]");
     private static readonly Field File = new("file", "Plume outline", "plume.geojson");
-    private static readonly Field Retardation = new("retardation", "Retardation factor", "1.4") { Limit = Limit.OneOrMore, Usual = UsualRange.Retardation };
+    private static readonly Field Retardation =
+        new("retardation", "Retardation factor", "1.4") { Limit = Limit.OneOrMore, Usual = UsualRange.Retardation };
 
     /// <summary>The plume.</summary>
     /// <param name="table">The table.</param>

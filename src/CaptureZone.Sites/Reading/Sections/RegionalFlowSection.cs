@@ -10,7 +10,8 @@ namespace CaptureZone.Sites.Reading.Sections;
 /// <param name="HeadAt">Where it is known, in the site's coordinates.</param>
 /// <param name="HeadOffset">Where the head stands in the file.</param>
 /// <param name="HeadAtOffset">Where its place stands in the file.</param>
-internal sealed record RegionalDraft(double? Gradient, double? Direction, double? Head, Coordinate? HeadAt, int HeadOffset, int HeadAtOffset);
+internal sealed record RegionalDraft(
+    double? Gradient, double? Direction, double? Head, Coordinate? HeadAt, int HeadOffset, int HeadAtOffset);
 
 /// <summary>Reads [regional_flow].</summary>
 internal static class RegionalFlowSection
@@ -34,7 +35,9 @@ internal static class RegionalFlowSection
         Coordinate? at = table.Place(HeadAt);
         if (!table.Has("flows_toward") && gradient is > 0)
         {
-            table.Missing("flows_toward", "[regional_flow] lacks flows_toward; add a line such as flows_toward = 112 (degrees clockwise from grid north)");
+            table.Missing(
+                "flows_toward",
+                "[regional_flow] lacks flows_toward; add a line such as flows_toward = 112 (degrees clockwise from grid north)");
         }
 
         table.Finish();

@@ -18,7 +18,8 @@ internal static class SourcesSection
         {
             if (entry.Value is not TomlText { Value.Length: > 0 } text)
             {
-                site.Complaints.Error(entry.Value.Start, $"a source must be a text in quotes, such as \"pumping test\"; found {Words.KindOf(entry.Value)}");
+                site.Complaints.Error(
+                    entry.Value.Start, $"a source must be a text in quotes, such as \"pumping test\"; found {Words.KindOf(entry.Value)}");
             }
             else if (site.Paths.Contains(path))
             {

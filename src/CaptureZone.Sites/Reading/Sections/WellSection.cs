@@ -16,12 +16,15 @@ internal sealed record WellDraft(string? Name, Coordinate? At, double? Rate, dou
 /// <summary>Reads one [[well]].</summary>
 internal static class WellSection
 {
+    private static readonly Limit Pumped = new(value => value >= 0, "0 or more; extracts and injects say which way the water goes");
+
     private static readonly Field Name = new("name", "", "RW-1") { Required = true };
     private static readonly Field At = new("at", "Place of the well", "[562310.0, 4641240.0]") { Required = true };
-    private static readonly Limit Pumped = new(value => value >= 0, "0 or more; extracts and injects say which way the water goes");
     private static readonly Field Extracts = new("extracts", "Extraction rate", "6.5 L/s") { Limit = Pumped, Usual = UsualRange.Rate };
     private static readonly Field Injects = new("injects", "Injection rate", "6.5 L/s") { Limit = Pumped, Usual = UsualRange.Rate };
-    private static readonly Field Radius = new("radius", "Radius of the screen's bore", "0.15 m") { Required = true, Limit = Limit.Positive, Usual = UsualRange.Radius };
+    private static readonly Field Radius =
+        new("radius", "Radius of the screen's bore", "0.15 m") { Required = true, Limit = Limit.Positive, Usual = UsualRange.Radius };
+
     private static readonly Field Purpose = new("purpose", "", "containment");
 
     /// <summary>The well.</summary>
@@ -50,7 +53,9 @@ internal static class WellSection
         }
         else if (!table.Has("extracts") && !table.Has("injects"))
         {
-            table.Missing("extracts", "[[well]] lacks a rate; add a line such as extracts = \"6.5 L/s\" (\"0 L/s\" when it stands idle), or injects = ...");
+            table.Missing(
+                "extracts",
+                "[[well]] lacks a rate; add a line such as extracts = \"6.5 L/s\" (\"0 L/s\" when it stands idle), or injects = ...");
         }
     }
 
@@ -66,7 +71,9 @@ internal static class WellSection
 
         if (table.Has("injects") && purpose is WellPurpose.Containment or WellPurpose.Supply)
         {
-            table.Error("purpose", "the purpose of a well that injects can only be \"other\", since capture counts what is extracted; leave it out");
+            table.Error(
+                "purpose",
+                "the purpose of a well that injects can only be \"other\", since capture counts what is extracted; leave it out");
         }
     }
 }

@@ -27,14 +27,18 @@ internal static class ZonesSection
         table.Finish();
         if (times.Length > MostTravelTimes)
         {
-            table.Error(TravelTimes.Key, $"travel_times has {Words.Number(times.Length)} times; at most {Words.Number(MostTravelTimes)} can be told apart on a map");
+            table.Error(
+                TravelTimes.Key,
+                $"travel_times has {Words.Number(times.Length)} times; at most {Words.Number(MostTravelTimes)} can be told apart on a map");
         }
 
         for (int i = 1; i < times.Length; i++)
         {
             if (times[..i].FirstOrDefault(earlier => earlier.Value == times[i].Value) is { } same)
             {
-                table.Site.Complaints.Error(times[i].Offset, $"{Words.Quote(times[i].Written)} is the same time as {Words.Quote(same.Written)}; leave one of the two out");
+                table.Site.Complaints.Error(
+                    times[i].Offset,
+                    $"{Words.Quote(times[i].Written)} is the same time as {Words.Quote(same.Written)}; leave one of the two out");
             }
         }
 

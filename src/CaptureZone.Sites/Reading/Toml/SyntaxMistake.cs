@@ -23,14 +23,25 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
             return null;
         }
 
-        ArraySyntax? open = document.Descendants().OfType<ArraySyntax>().FirstOrDefault(array => array.CloseBracket is null);
-        int offset = Math.Min(open?.Span.Start.Offset ?? first.Span.Start.Offset, text.Length);
-        int start = text.LastIndexOf('\n', Math.Max(offset - 1, 0)) + 1;
+        int found = Math.Min(first.Span.Start.Offset, text.Length);
+        int? open = OpenListBefore(document, text, found);
+        int offset = open ?? found;
+        int start = StartOfLine(text, offset);
         int end = text.IndexOf('\n', start);
         string line = text[start..(end < 0 ? text.Length : end)].TrimEnd('\r');
         string parserSays = TokenName().Replace(first.Message, "").Replace("\u2424", "the end of the line", StringComparison.Ordinal);
         return open is null ? Explain(line, start, offset, parserSays) : OpenList(line, start, offset);
     }
+
+    /// <summary>Where a list begins that is still open when the next line, or the end of the file, shows that it should not be.</summary>
+    private static int? OpenListBefore(DocumentSyntax document, string text, int offset)
+    {
+        bool beginsLine = offset == text.Length || string.IsNullOrWhiteSpace(text[StartOfLine(text, offset)..offset]);
+        ArraySyntax? open = document.Descendants().OfType<ArraySyntax>().LastOrDefault(array => array.CloseBracket is null);
+        return beginsLine ? open?.Span.Start.Offset : null;
+    }
+
+    private static int StartOfLine(string text, int offset) => offset == 0 ? 0 : text.LastIndexOf('\n', offset - 1) + 1;
 
     private static SyntaxMistake OpenList(string line, int start, int offset)
     {
@@ -53,14 +64,13 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
             return new(start, start + open.Index, $"the header is not closed; write {mended}", mended);
         }
 
-        if (line.AsSpan().TrimStart().StartsWith("["))
+        if (KeyLine().Match(line) is { Success: true } pair)
         {
-            return new(start, offset, $"this is not a TOML header: {Words.Short(parserSays)}", null);
+            return ExplainPair(pair, start, offset, parserSays);
         }
 
-        return KeyLine().Match(line) is { Success: true } pair
-            ? ExplainPair(pair, start, offset, parserSays)
-            : new(start, offset, $"this is not TOML: {Words.Short(parserSays)}", "");
+        // Without its header, the keys of a table would seem to belong to the table before.
+        return new(start, offset, $"this is not TOML: {Words.Short(parserSays)}", MaybeHeader().IsMatch(line) ? null : "");
     }
 
     private static SyntaxMistake ExplainPair(Match pair, int start, int offset, string parserSays)
@@ -74,7 +84,8 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
 
         if (sign.Value == ":")
         {
-            return new(start, start + sign.Index, $"a key and its value are parted by \"=\", not \":\"; write {key} = {Words.Short(value)}", $"{key} = {value}");
+            string words = $"a key and its value are parted by \"=\", not \":\"; write {key} = {Words.Short(value)}";
+            return new(start, start + sign.Index, words, $"{key} = {value}");
         }
 
         string numeral = value.Replace(',', '.');
@@ -103,7 +114,12 @@ internal sealed partial record SyntaxMistake(int LineStart, int Offset, string T
     [GeneratedRegex(@"^\s*(?<open>\[\[?)(?<name>[A-Za-z0-9_-]+)\]?\s*(#.*)?$", RegexOptions.CultureInvariant)]
     private static partial Regex HeaderLine();
 
-    [GeneratedRegex(@"^\s*(?<key>[A-Za-z0-9_.-]+|""[^""]*"")\s*(?<sign>[=:])\s*(?<value>(""[^""]*""|[^#])*?)\s*(#.*)?$", RegexOptions.CultureInvariant)]
+    [GeneratedRegex(@"^[^=,]*\[\s*[^\d\s+\[-][^=,]*$|^[^=,]*\[\[[^=,]*$", RegexOptions.CultureInvariant)]
+    private static partial Regex MaybeHeader();
+
+    [GeneratedRegex(
+        @"^\s*(?<key>[A-Za-z0-9_.-]+|""[^""]*"")\s*(?<sign>[=:])\s*(?<value>(""[^""]*""|[^#""])*?(""[^""]*)?)\s*(#.*)?$",
+        RegexOptions.CultureInvariant)]
     private static partial Regex KeyLine();
 
     [GeneratedRegex(@"=\s*\[.*[\d""\]]\s*$", RegexOptions.CultureInvariant)]

@@ -58,7 +58,8 @@ internal static class TomlParser
         catch (TomlException)
         {
             // The parser throws for one thing only, and without its place: nesting beyond its limit.
-            complaints.Error(MostNested(complaints.Source.Text), "brackets are nested too deeply here; a site file needs no more than four");
+            complaints.Error(
+                MostNested(complaints.Source.Text), "brackets are nested too deeply here; a site file needs no more than four");
             return null;
         }
     }

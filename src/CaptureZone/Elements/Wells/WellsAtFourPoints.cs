@@ -5,7 +5,10 @@ using V = System.Runtime.Intrinsics.Vector256<double>;
 
 namespace CaptureZone.Elements.Wells;
 
-/// <summary>Sums over wells at many points, a lane a point. Symbols as in <see cref="WellsAtOnePoint"/>.</summary>
+/// <summary>
+/// Sums over wells at many points, a lane a point. Symbols as in <see cref="WellsAtOnePoint"/>. Compiled in full at the first call: a
+/// command asks for many points but a few times, too few for the loops to be compiled again when they turn out to be busy.
+/// </summary>
 internal static class WellsAtFourPoints
 {
     /// <summary>Adds what the wells contribute at the first points.</summary>
@@ -15,6 +18,7 @@ internal static class WellsAtFourPoints
     /// <param name="ask">What is wanted.</param>
     /// <param name="strength">Rate of each well, m3/d.</param>
     /// <param name="into">Where it is added.</param>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public static void Add(WellPlaces wells, Points at, int count, Ask ask, ReadOnlySpan<double> strength, in FlowBlock into)
     {
         for (int i = 0; i < count; i += WellPlaces.Lanes)
@@ -42,6 +46,7 @@ internal static class WellsAtFourPoints
         }
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     private static V Potential(WellPlaces wells, V x, V y, ReadOnlySpan<double> strength)
     {
         V s0 = default, s1 = default, s2 = default, s3 = default;
@@ -56,6 +61,7 @@ internal static class WellsAtFourPoints
         return ((s0 + s1) + (s2 + s3)) * WellPlaces.OneOverFourPi;
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     private static void Discharge(WellPlaces wells, V x, V y, ReadOnlySpan<double> strength, out V qx, out V qy)
     {
         V x0 = default, x1 = default, x2 = default, x3 = default, y0 = default, y1 = default, y2 = default, y3 = default;
@@ -71,6 +77,7 @@ internal static class WellsAtFourPoints
         qy = ((y0 + y1) + (y2 + y3)) * -WellPlaces.OneOverTwoPi;
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     private static void Gradient(WellPlaces wells, V x, V y, ReadOnlySpan<double> strength, out V qxx, out V qxy)
     {
         V x0 = default, x1 = default, x2 = default, x3 = default, y0 = default, y1 = default, y2 = default, y3 = default;

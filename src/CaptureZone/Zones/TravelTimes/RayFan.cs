@@ -35,6 +35,11 @@ internal sealed class RayFan
     /// <summary>Neighbours are that far apart where a ray is launched between them, as a share of the smallest zone's radius.</summary>
     private const double LaunchShare = 5e-3;
 
+    /// <summary>
+    /// Distances between neighbours are told from their vertices, whose times are rough: this share of what was told must be found.
+    /// </summary>
+    private const double LeastApart = 0.02;
+
     /// <summary>Error of the water's volume between two neighbours that needs no ray between, as a share of rate x time.</summary>
     private const double VolumeShare = 1e-5;
 
@@ -200,15 +205,19 @@ internal sealed class RayFan
     private Complex? LaunchBetween(Ray a, Ray b)
     {
         double apart = LaunchShare * _radii[0];
-        foreach (double time in a.Course.Concat(b.Course).Select(point => point.Time).Where(double.IsFinite).Order())
+        double[] times = [.. a.Course.Concat(b.Course).Select(point => point.Time).Where(time => time > 0 && double.IsFinite(time)).Order()];
+        for (int i = 0, stride = 1; i < times.Length; i++)
         {
-            if (time > 0 && Complex.Abs(a.At(time) - b.At(time)) >= 2 * apart)
+            if (Complex.Abs(a.At(times[i]) - b.At(times[i])) >= apart)
             {
-                Complex first = _tracing.PlaceAt(a, time), second = _tracing.PlaceAt(b, time);
-                if (Complex.Abs(first - second) >= apart)
+                Complex first = _tracing.PlaceAt(a, times[i]), second = _tracing.PlaceAt(b, times[i]);
+                if (Complex.Abs(first - second) >= LeastApart * apart)
                 {
                     return (first + second) / 2;
                 }
+
+                i += stride;
+                stride *= 2;
             }
         }
 

@@ -64,6 +64,29 @@ public sealed class WellBankTests
         }
     }
 
+    /// <summary>Potentials may differ as the logarithms do, by the last digits of the sizes added.</summary>
+    [Theory]
+    [InlineData(1)]
+    [InlineData(7)]
+    [InlineData(12)]
+    public void A_machine_without_vectors_gives_the_same_bits(int count)
+    {
+        Well[] wells = Superposed.Wells(count, seed: count);
+        WellBank bank = new(wells);
+        double[] strength = [.. wells.Select(well => well.Rate)];
+        WellPlaces places = new([.. wells.Select(well => well.At.Real)], [.. wells.Select(well => well.At.Imaginary)]);
+        (double[] x, double[] y) = Superposed.Places(50, 800, seed: 1);
+        for (int i = 0; i < x.Length; i++)
+        {
+            const Ask everything = Ask.Potential | Ask.Discharge | Ask.Gradient;
+            PointFlow plain = default, lanes = default;
+            ScalarWells.Add(places, x[i], y[i], everything, strength, ref plain);
+            bank.AddAt(x[i], y[i], Side.Off, everything, strength, ref lanes);
+            Assert.Equal(lanes.Potential, plain.Potential, 1e-15 * 8 * strength.Sum(Math.Abs));
+            Assert.Equal(lanes with { Potential = 0 }, plain with { Potential = 0 });
+        }
+    }
+
     [Theory]
     [InlineData(200, double.NegativeInfinity)]
     [InlineData(-200, double.PositiveInfinity)]

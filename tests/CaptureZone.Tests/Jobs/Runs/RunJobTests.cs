@@ -99,7 +99,10 @@ public sealed class RunJobTests : IDisposable
         IWorkers? workers = null,
         IProgress<Step>? progress = null,
         CancellationToken cancel = default) =>
-        job.Run(_sample.Site, new RunRequest(_temp[name], Replace: false, shapefiles), new Work(workers ?? new OneWorker(), progress, cancel));
+        job.Run(
+            _sample.Site,
+            new RunRequest(_temp[name], Replace: false, shapefiles),
+            new Work(workers ?? new OneWorker(), progress, cancel));
 
     private sealed class StopAt(string step, CancellationTokenSource stop) : IProgress<Step>
     {

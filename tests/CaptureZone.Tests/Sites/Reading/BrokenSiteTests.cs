@@ -644,6 +644,30 @@ public sealed class BrokenSiteTests
         Assert.Equal(reading.Complaints.Any(complaint => complaint.Severity == Severity.Error), reading.Document is null);
     }
 
+    [Theory]
+    [InlineData("  [562200.0 4641200.0],\n", "34:13: error: this is not TOML: Missing a `,` to separate items in an array")]
+    [InlineData("  [562200.0, 4641200.O],\n", "34:14: error: this is not TOML: ")]
+    [InlineData("  [562200.0, 4641200.0] x,\n", "34:25: error: this is not TOML: ")]
+    [InlineData("  [562200.0, 4641200.0\n", "33:11: error: the list that begins here is not closed; put ] at its end")]
+    public void A_slip_in_a_long_outline_is_told_on_its_own_line(string corner, string complaint)
+    {
+        SiteReading reading = SmallSite.Read(SmallSite.With(
+            "outline = [[561800.0, 4641300.0], [562200.0, 4641200.0], [562200.0, 4641300.0]]",
+            $"outline = [[561800.0, 4641300.0], [561900.0, 4641200.0],\n{corner}  [562200.0, 4641300.0],\n]"));
+        Assert.StartsWith(complaint, SmallSite.Complaints(reading).Single(), StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("\u0004[well]]")]
+    [InlineData("[[well")]
+    [InlineData("[well]]")]
+    [InlineData("[ [well]")]
+    public void A_broken_header_brings_no_complaints_of_the_keys_under_it(string header)
+    {
+        string text = SmallSite.With("[[well]]\nname = \"RW-2\"", $"{header}\nname = \"RW-2\"");
+        Assert.Equal([24], SmallSite.Read(text).Complaints.Select(complaint => complaint.Line));
+    }
+
     [Fact]
     public void All_mistakes_of_a_file_are_told_at_once_in_its_order()
     {

@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Numerics;
 using System.Security.Cryptography;
 using System.Text;
+using CaptureZone.Aquifers;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Sites;
 using CaptureZone.Sites.Reading;
@@ -11,7 +12,7 @@ namespace CaptureZone.Tests.Sites.Reading;
 
 public sealed class SiteReaderTests
 {
-    /// <summary>Half a micrometre: local coordinates are differences of whole numbers here, so they should be exact.</summary>
+    /// <summary>Values that are read and not computed must come through to the last bit.</summary>
     private const double Exact = 0;
 
     [Fact]
@@ -20,7 +21,7 @@ public sealed class SiteReaderTests
         SiteDocument site = Document(SmallSite.Text);
         Assert.Equal("Small site", site.Title);
         Assert.Equal(26914, site.Coordinates.Epsg);
-        Assert.Equal(new Aquifers.Aquifer(18, 212, 224, 0.24), site.Model.Aquifer);
+        Assert.Equal(new Aquifer(18, 212, 224, 0.24), site.Model.Aquifer);
         Assert.Equal(0.0031, site.Model.Regional.Gradient, Exact);
         Assert.Equal((90 - 112) * Math.PI / 180, site.Model.Regional.Direction, Exact);
         Assert.Equal(238.6, site.Model.Regional.Head, Exact);
@@ -30,8 +31,8 @@ public sealed class SiteReaderTests
         Assert.Equal([WellPurpose.Containment, WellPurpose.Other], site.Model.Wells.Select(well => well.Purpose));
         Assert.Equal(1.4, site.Questions.Plumes.Single().Retardation, Exact);
         Assert.Equal(20_000, site.Questions.Plumes.Single().Outline.Area, 1e-6);
-        Assert.Equal([365.25, 5 * 365.25], site.Questions.TravelTimes);
-        Assert.Equal(["1 yr", "5 yr"], site.TravelTimeLabels);
+        Assert.Equal([365.25, 5 * 365.25], site.Questions.TravelTimes.AsEnumerable());
+        Assert.Equal(["1 yr", "5 yr"], site.TravelTimeLabels.AsEnumerable());
         Assert.Equal(1, site.Questions.HeadUnit, Exact);
         Assert.Equal(new ReportSettings(ReportUnits.Metric, "", "", "", "2026-12-01", ""), site.Report);
         Assert.IsType<LineString>(site.Backdrops.Single().Shape);
@@ -64,7 +65,7 @@ public sealed class SiteReaderTests
         Assert.Equal(160 * 0.3048, Complex.Abs(site.Model.Wells[1].At - site.Model.Wells[0].At), 1e-12);
         Assert.Equal(50 * 0.3048, site.Model.Aquifer.Conductivity, 1e-14);
         Assert.Equal(4 * 0.0254, site.Model.Wells[0].Radius, 1e-15);
-        Assert.Equal(16 * 5.45099296896, site.Model.Wells[0].Rate, 1e-9);
+        Assert.Equal(24 * 5.45099296896, site.Model.Wells[0].Rate, 1e-9);
         Assert.Equal(0.3048, site.Questions.HeadUnit, Exact);
         Assert.Equal(ReportUnits.Us, site.Report.Units);
     }
@@ -120,8 +121,8 @@ public sealed class SiteReaderTests
     public void Travel_times_come_in_increasing_order_with_their_labels()
     {
         SiteDocument site = Document(SmallSite.With("\"1 yr\", \"5 yr\"", "\"5 yr\", \"30 d\", \"1 yr\""));
-        Assert.Equal([30, 365.25, 1826.25], site.Questions.TravelTimes);
-        Assert.Equal(["30 d", "1 yr", "5 yr"], site.TravelTimeLabels);
+        Assert.Equal([30, 365.25, 1826.25], site.Questions.TravelTimes.AsEnumerable());
+        Assert.Equal(["30 d", "1 yr", "5 yr"], site.TravelTimeLabels.AsEnumerable());
     }
 
     [Theory]
@@ -169,7 +170,7 @@ public sealed class SiteReaderTests
     public void Warnings_do_not_keep_a_site_from_being_read()
     {
         SiteReading reading = SmallSite.Read(SmallSite.With("porosity = 0.24", "porosity = 0.6"));
-        Assert.Equal(reading.Complaints, reading.Document!.Warnings);
+        Assert.Equal(reading.Complaints.AsEnumerable(), reading.Document!.Warnings.AsEnumerable());
         Assert.Equal(Severity.Warning, reading.Complaints.Single().Severity);
     }
 
@@ -213,8 +214,8 @@ public sealed class SiteReaderTests
     [Fact]
     public void Columns_count_characters_not_bytes()
     {
-        string text = SmallSite.With("name = \"Cr\"\n", "").Replace("[[plume]]", "[[plume]]\n\"n\u00e4m\U0001D11E\" = 1; x", StringComparison.Ordinal);
-        Assert.StartsWith("32:11: error:", SmallSite.Complaints(SmallSite.Read(text))[0], StringComparison.Ordinal);
+        string text = SmallSite.With("title = \"Small site\"", "title = \"\u00e9\U0001D11E\" x");
+        Assert.StartsWith("2:14: error:", SmallSite.Complaints(SmallSite.Read(text)).Single(), StringComparison.Ordinal);
     }
 
     [Theory]
