@@ -21,11 +21,15 @@ public sealed class FlowTopology
     private FlowTopology(Tracer tracer, ImmutableArray<DividingBranch> branches)
     {
         Tracer = tracer;
+        Scout = new Tracer(tracer.Stops, Tracer.RoughTolerance);
         Branches = branches;
     }
 
     /// <summary>Follows paths among these stagnation points.</summary>
     public Tracer Tracer { get; }
+
+    /// <summary>The same, roughly, for many paths of which only fates, or times to some 1e-4, are wanted.</summary>
+    public Tracer Scout { get; }
 
     /// <summary>The field.</summary>
     public FlowField Field => Tracer.Stops.Field;

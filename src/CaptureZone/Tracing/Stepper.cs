@@ -7,16 +7,17 @@ namespace CaptureZone.Tracing;
 /// <summary>Takes single steps along paths: dz/ds = Q/|Q|, dt/ds = n h/|Q|.</summary>
 /// <param name="field">The field.</param>
 /// <param name="sign">1 with the water, -1 against it.</param>
-internal readonly struct Stepper(FlowField field, double sign)
+/// <param name="tolerance">
+/// Error allowed in a step, as a share of the distance to the nearest singular place (position) or of the time.
+/// </param>
+internal readonly struct Stepper(FlowField field, double sign, double tolerance)
 {
-    /// <summary>Error allowed in a step, as a share of the distance to the nearest singular place (position) or of the time.</summary>
-    private const double Tolerance = 1e-8;
-
     /// <summary>Weight of the error estimate of order 3 against that of order 5 (Hairer, Norsett and Wanner 1993, section II.10).</summary>
     private const double LowOrderWeight = 0.01;
 
     private readonly FlowField _field = field;
     private readonly double _sign = sign;
+    private readonly double _tolerance = tolerance;
     private readonly Aquifer _aquifer = field.Parameters.Aquifer;
 
     /// <summary>Space that one step needs.</summary>
@@ -79,8 +80,8 @@ internal readonly struct Stepper(FlowField field, double sign)
         Complex end = new(from.At.Real + step * dx, from.At.Imaginary + step * dy);
         double time = from.Time + step * dt;
         error = Math.Max(
-            Math.Max(Error(kx, step, Tolerance * clearance), Error(ky, step, Tolerance * clearance)),
-            Error(kt, step, Tolerance * time));
+            Math.Max(Error(kx, step, _tolerance * clearance), Error(ky, step, _tolerance * clearance)),
+            Error(kt, step, _tolerance * time));
         return NodeAt(end, time, from.Length + step);
     }
 

@@ -39,14 +39,21 @@ internal ref struct Walk
     private double _drift;
 
     internal Walk(
-        PathStops stops, ReadOnlySpan<Snare> snares, Complex from, Sense sense, double longest, IPathSink? sink, int leaving)
+        PathStops stops,
+        ReadOnlySpan<Snare> snares,
+        double tolerance,
+        Complex from,
+        Sense sense,
+        double longest,
+        IPathSink? sink,
+        int leaving)
     {
         _stops = stops;
         _field = stops.Field;
         _snares = snares;
         _sign = sense == Sense.Downstream ? 1 : -1;
         _longest = longest;
-        _stepper = new Stepper(_field, _sign);
+        _stepper = new Stepper(_field, _sign, tolerance);
         _vertices = new PathVertices(_field, _sign, sink);
         _leaving = leaving;
         _node = _stepper.NodeAt(from, 0, 0);

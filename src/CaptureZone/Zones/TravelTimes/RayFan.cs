@@ -46,18 +46,24 @@ internal sealed class RayFan
     /// <summary>Divisions after which what double precision tells apart has been reached.</summary>
     private const int MostDivisions = 64;
 
+    /// <summary>More rays than any stretch needs: beyond, the outline is left as it is and its pore volume tells.</summary>
+    private const int MostRays = 5000;
+
     private readonly RayTracing _tracing;
     private readonly ImmutableArray<double> _times;
     private readonly ImmutableArray<double> _radii;
     private readonly Polyline[] _chains;
+    private readonly double _middle;
     private readonly List<Ray> _rays = [];
 
-    private RayFan(RayTracing tracing, ImmutableArray<double> times, ImmutableArray<double> radii, Polyline[] chains)
+    private RayFan(
+        RayTracing tracing, ImmutableArray<double> times, ImmutableArray<double> radii, Polyline[] chains, ScreenStretch stretch)
     {
         _tracing = tracing;
         _times = times;
         _radii = radii;
         _chains = chains;
+        _middle = (stretch.From + stretch.To) / 2;
     }
 
     /// <summary>The rays, the sides' own first and last.</summary>
@@ -75,7 +81,7 @@ internal sealed class RayFan
         Polyline[] chains = stretch is { Begin: { } begin, End: { } end }
             ? [SideChain.Of(topology, begin, -1, ChainShare * radii[0]), SideChain.Of(topology, end, 1, ChainShare * radii[0])]
             : [];
-        RayFan fan = new(tracing, times, radii, chains);
+        RayFan fan = new(tracing, times, radii, chains, stretch);
         fan.Fill(stretch);
         return fan;
     }
@@ -124,6 +130,7 @@ internal sealed class RayFan
     private void Divide(Ray a, Ray b, int depth)
     {
         if (depth >= MostDivisions
+            || _rays.Count >= MostRays
             || AllTimes(i => VolumeDiffers(a, b, i) <= VolumeShare && (IsClose(a, b, i) || Clinging(a, b, i) is not null)))
         {
             return;
@@ -181,7 +188,7 @@ internal sealed class RayFan
         }
 
         double cling = ClingShare * _radii[index];
-        foreach (Polyline chain in _chains)
+        foreach (Polyline chain in IsNearerEnd(a, b) ? _chains.AsEnumerable().Reverse() : _chains)
         {
             Polyline.Foot from = chain.FootOf(a.Fronts[index]);
             if (from.Distance <= cling && chain.FootOf(b.Fronts[index]) is var to && to.Distance <= cling)
@@ -192,6 +199,9 @@ internal sealed class RayFan
 
         return null;
     }
+
+    /// <summary>Both sides may lead from one stagnation point to one injection well: neighbours run along the one that they are next to.</summary>
+    private bool IsNearerEnd(Ray a, Ray b) => (a.Angle + b.Angle) / 2 > _middle;
 
     private Ray? Between(Ray a, Ray b)
     {
