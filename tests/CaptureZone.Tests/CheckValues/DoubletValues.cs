@@ -7,9 +7,9 @@ namespace CaptureZone.Tests.CheckValues;
 
 /// <summary>
 /// Injection and extraction at equal rates 100 m apart, n 0.25, b 20 m. From memory, derived again, checked by quadrature and
-/// tracking (M. Muskat 1937; C. DaCosta and R.R. Bennett, IASH Publ. 52, 1960, 524; D.B. Grove 1971; A.C. Gringarten and J.P. Sauty 1975;
-/// M.J. Lippmann and C.F. Tsang, Ground Water 18(5), 1980, 452; J. Luo and P.K. Kitanidis, J. Hydrology 295, 2004, 149; D. Banks 2009: abstract
-/// seen). Figures computed from the published formulas; 1e-6 relative.
+/// tracking (M. Muskat 1937; C. DaCosta and R.R. Bennett, IASH Publ. 52, 1960, 524; D.B. Grove 1971; A.C. Gringarten and J.P. Sauty
+/// 1975; M.J. Lippmann and C.F. Tsang, Ground Water 18(5), 1980, 452; J. Luo and P.K. Kitanidis, J. Hydrology 295, 2004, 149; D.
+/// Banks 2009: abstract seen). Figures computed from the published formulas; 1e-6 relative.
 /// </summary>
 public sealed class DoubletValues
 {

@@ -14,7 +14,9 @@ public sealed class FieldExampleValues
 {
     private const double GallonsPerCubicFoot = 1728.0 / 231;
 
-    /// <summary>Case 13h, published, seen (San Joaquin County EHD, document 453869, p. 25): 63.30 to 62.70 ft over 110 ft is 0.0055.</summary>
+    /// <summary>
+    /// Case 13h, published, seen (San Joaquin County EHD, document 453869, p. 25): 63.30 to 62.70 ft over 110 ft is 0.0055.
+    /// </summary>
     [Fact]
     public void A_gradient_between_two_levels_is_as_printed()
     {
@@ -25,9 +27,9 @@ public sealed class FieldExampleValues
     }
 
     /// <summary>
-    /// Case 15c, inputs published, seen (San Joaquin County EHD, document 590704, p. 399, printed K 588 gpd/ft2), outputs computed: T 10 000
-    /// gpd/ft, b 17 ft, i 0.005, water at 1.12 ft/d, reach 70 ft down-gradient; Q = 2 pi r T i = 21 991.1 gpd = 15.272 gpm, half widths 219.911
-    /// and 109.956 ft, n 0.3511; 1e-6 relative or half the last digit.
+    /// Case 15c, inputs published, seen (San Joaquin County EHD, document 590704, p. 399, printed K 588 gpd/ft2), outputs computed: T
+    /// 10 000 gpd/ft, b 17 ft, i 0.005, water at 1.12 ft/d, reach 70 ft down-gradient; Q = 2 pi r T i = 21 991.1 gpd = 15.272 gpm,
+    /// half widths 219.911 and 109.956 ft, n 0.3511; 1e-6 relative or half the last digit.
     /// </summary>
     [Fact]
     public void A_fuel_sites_well_reaches_as_far_and_as_wide_as_computed()
@@ -44,9 +46,9 @@ public sealed class FieldExampleValues
     }
 
     /// <summary>
-    /// Case 13j: R = 2.7; 250 m at 0.12 m/d take water 2083.333 d and the contaminant 5625 d. Computed, formula seen (an EPA training page; R.A.
-    /// Freeze and J.A. Cherry, <i>Groundwater</i>, 1979, eq. 9.14, from memory). The well is so weak that its pull shows only within
-    /// millimetres; 1e-6 relative.
+    /// Case 13j: R = 2.7; 250 m at 0.12 m/d take water 2083.333 d and the contaminant 5625 d. Computed, formula seen (an EPA training
+    /// page; R.A. Freeze and J.A. Cherry, <i>Groundwater</i>, 1979, eq. 9.14, from memory). The well is so weak that its pull shows
+    /// only within millimetres; 1e-6 relative.
     /// </summary>
     [Fact]
     public void A_sorbing_contaminant_takes_R_times_as_long()

@@ -16,9 +16,9 @@ public sealed class FixedRadiusValues
     private const double MinutesPerDay = 1440;
 
     /// <summary>
-    /// Case 5a, from memory (EPA 440/6-87-010, 1987, example of the calculated fixed radius; its arithmetic closes): 694.4 gpm, n 0.2, 300 ft,
-    /// 5 yr; printed 1138 ft, recomputed 1137.67 ft from its 48 793 668 ft3/yr, else 1137.63 ft in years of 365 d and 1138.02 ft in years of
-    /// 365.25 d. Tolerance 1 ft to the print.
+    /// Case 5a, from memory (EPA 440/6-87-010, 1987, example of the calculated fixed radius; its arithmetic closes): 694.4 gpm, n
+    /// 0.2, 300 ft, 5 yr; printed 1138 ft, recomputed 1137.67 ft from its 48 793 668 ft3/yr, else 1137.63 ft in years of 365 d and
+    /// 1138.02 ft in years of 365.25 d. Tolerance 1 ft to the print.
     /// </summary>
     [Theory]
     [InlineData(48_793_668.0 / 365, 365, 1137.67)]
@@ -43,7 +43,9 @@ public sealed class FixedRadiusValues
         Assert.Equal(1859.502, found, 1.3e-5 * 1859.502);
     }
 
-    /// <summary>Case 5d, computed: 1500 m3/d, 1826.25 d, n 0.2, 30 m; pi r2 n H = Q t; 1e-6 relative, the polygon's area within 0.1 %.</summary>
+    /// <summary>
+    /// Case 5d, computed: 1500 m3/d, 1826.25 d, n 0.2, 30 m; pi r2 n H = Q t; 1e-6 relative, the polygon's area within 0.1 %.
+    /// </summary>
     [Fact]
     public void The_zone_without_regional_flow_is_the_circle_of_that_radius()
     {

@@ -14,9 +14,10 @@ public sealed class StreamWellValues
     private const double Held = 500;
 
     /// <summary>
-    /// Case 7a, published and recomputed, seen (G.M. Fair, J.C. Geyer, D.A. Okun, 3rd ed. by N.K. Shammas and L.K. Wang 2011, example 3.8, pp.
-    /// 91-93): 32 000 gpd/ft, 700 gpm, 1000 ft from the stream, screen 1 ft; in feet. Tolerance 0.5 %. The printed 2.56 ft at 1500 ft
-    /// from the stream is an error of the source (it takes 1500 ft for the distance to the well, which is 500 ft): 8.07 ft is right.
+    /// Case 7a, published and recomputed, seen (G.M. Fair, J.C. Geyer, D.A. Okun, 3rd ed. by N.K. Shammas and L.K. Wang 2011, example
+    /// 3.8, pp. 91-93): 32 000 gpd/ft, 700 gpm, 1000 ft from the stream, screen 1 ft; in feet. Tolerance 0.5 %. The printed 2.56 ft
+    /// at 1500 ft from the stream is an error of the source (it takes 1500 ft for the distance to the well, which is 500 ft): 8.07 ft
+    /// is right.
     /// </summary>
     [Fact]
     public void A_textbook_well_beside_a_stream_draws_down()
@@ -45,9 +46,9 @@ public sealed class StreamWellValues
 
     /// <summary>
     /// Case 7d, a stream that gains 0.5 m2/d, 120 m from the well, Qc = pi d q: stream water in what the well takes, here from the
-    /// image. Computed from the published formula (J.L. Wilson, Water Resour. Res. 29(10), 1993, 3503, doi 10.1029/93WR01393: abstract seen,
-    /// formulas from memory and derived again; J.M. Newsom and J.L. Wilson, Ground Water 26(6), 1988, 703, from memory); 1e-6 relative. The
-    /// width far up-gradient is (1 - f) Q / q.
+    /// image. Computed from the published formula (J.L. Wilson, Water Resour. Res. 29(10), 1993, 3503, doi 10.1029/93WR01393:
+    /// abstract seen, formulas from memory and derived again; J.M. Newsom and J.L. Wilson, Ground Water 26(6), 1988, 703, from
+    /// memory); 1e-6 relative. The width far up-gradient is (1 - f) Q / q.
     /// </summary>
     [Theory]
     [InlineData(0.5, 0)]

@@ -77,7 +77,7 @@ public sealed class DormandPrinceTests
     {
         Complex centre = new(0, 20);
         double radius = Complex.Abs(50 - centre), start = 2.4, arc = 1.8;
-        Stepper stepper = new(field, 1);
+        Stepper stepper = new(field, 1, Tracer.FineTolerance);
         Node node = stepper.NodeAt(centre + Complex.FromPolarCoordinates(radius, start), 0, 0);
         Span<double> work = stackalloc double[Stepper.Workspace];
         for (int i = 0; i < steps; i++)
@@ -111,7 +111,9 @@ public sealed class DormandPrinceTests
     /// <summary>All rooted trees of an order, each once.</summary>
     private static IEnumerable<Tree> TreesOf(int order) => Forests(order - 1, order - 1, int.MaxValue).Select(forest => new Tree(forest));
 
-    /// <summary>All multisets of trees with a number of nodes in all; their trees in falling order, then falling place in that order.</summary>
+    /// <summary>
+    /// All multisets of trees with a number of nodes in all; their trees in falling order, then falling place in that order.
+    /// </summary>
     private static IEnumerable<Tree[]> Forests(int nodes, int largest, int places)
     {
         if (nodes == 0)

@@ -20,7 +20,9 @@ public sealed class TracerTests
     /// <summary>Two extraction wells and one injection well; flow toward -x, discharge 0.6 m2/d.</summary>
     private static readonly Model Three = Confined(15, 20, 0.002, 0.25, 0.15, (0, 400), (new(120, 250), 200), (new(-300, 90), -150));
 
-    /// <summary>Closed form on the axis (J. Bear and M. Jacobs 1965, from memory): t = (n / q0) (x - L ln(1 + x / L)), L = Q / (2 pi q0 b).</summary>
+    /// <summary>
+    /// Closed form on the axis (J. Bear and M. Jacobs 1965, from memory): t = (n / q0) (x - L ln(1 + x / L)), L = Q / (2 pi q0 b).
+    /// </summary>
     [Theory]
     [InlineData(700.0)]
     [InlineData(20.0)]
@@ -76,7 +78,9 @@ public sealed class TracerTests
         }
     }
 
-    /// <summary>Derived: Phi falls by Q0 for each metre, h = sqrt(2 Phi / K), so that t = (n / Q0^2) sqrt(2 / K) (2 / 3) Phi0^(3/2).</summary>
+    /// <summary>
+    /// Derived: Phi falls by Q0 for each metre, h = sqrt(2 Phi / K), so that t = (n / Q0^2) sqrt(2 / K) (2 / 3) Phi0^(3/2).
+    /// </summary>
     [Fact]
     public void A_water_table_runs_dry_at_the_place_and_time_of_the_closed_form()
     {
