@@ -1,4 +1,3 @@
-using System.Numerics;
 using CaptureZone.Aquifers;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Tracing;
