@@ -76,8 +76,18 @@ public sealed class Tracer
         _snares = [.. stops.Stagnation.Points.Select((point, index) => Snare.About(stops, point, index))];
     }
 
+    private Tracer(PathStops stops, double tolerance, Snare[] snares)
+    {
+        _stops = stops;
+        _tolerance = tolerance;
+        _snares = snares;
+    }
+
     /// <summary>Where paths end.</summary>
     public PathStops Stops => _stops;
+
+    /// <summary>Follows paths past stagnation points, however near they come.</summary>
+    internal Tracer PastStagnation() => new(_stops, _tolerance, [.. _snares.Select(snare => snare with { Radius = 0 })]);
 
     /// <summary>Follows one particle.</summary>
     /// <param name="from">Start, m.</param>

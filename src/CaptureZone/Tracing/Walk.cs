@@ -223,13 +223,14 @@ internal ref struct Walk
     }
 
     /// <summary>
-    /// Cuts a step to where what remains before a mark is zero, by regula falsi with the Illinois rule; every trial is a step of
-    /// its own, so that the end is as exact as the method.
+    /// Cuts a step to where what remains before a mark is zero, by regula falsi with the Illinois rule (an end kept twice counts
+    /// half); every trial is a step of its own, so that the end is as exact as the method.
     /// </summary>
     private readonly void Cut(ref Node next, in Mark mark, Span<Vector256<double>> work)
     {
         double low = 0, atLow = mark.Remaining(_node), high = next.Length - _node.Length, atHigh = mark.Remaining(next);
         double enough = Mark.Enough * (atLow - atHigh);
+        bool keptHigh = false, keptLow = false;
         for (int i = 0; i < Mark.MostTrials && atLow > 0 && high > low; i++)
         {
             double trial = low + (high - low) * (atLow / (atLow - atHigh));
@@ -242,11 +243,15 @@ internal ref struct Walk
 
             if (left > 0)
             {
-                (low, atLow, atHigh) = (trial, left, atHigh / 2);
+                (low, atLow) = (trial, left);
+                atHigh = keptHigh ? atHigh / 2 : atHigh;
+                (keptHigh, keptLow) = (true, false);
             }
             else
             {
-                (high, atHigh, atLow) = (trial, left, atLow / 2);
+                (high, atHigh) = (trial, left);
+                atLow = keptLow ? atLow / 2 : atLow;
+                (keptHigh, keptLow) = (false, true);
             }
         }
     }
