@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.Intrinsics;
 using CaptureZone.Flow;
 using CaptureZone.Tracing;
 using static CaptureZone.Tests.SampleModels;
@@ -78,8 +79,8 @@ public sealed class DormandPrinceTests
         Complex centre = new(0, 20);
         double radius = Complex.Abs(50 - centre), start = 2.4, arc = 1.8;
         Stepper stepper = new(field, 1, Tracer.FineTolerance);
-        Node node = stepper.NodeAt(centre + Complex.FromPolarCoordinates(radius, start), 0, 0);
-        Span<double> work = stackalloc double[Stepper.Workspace];
+        Node node = stepper.Start(centre + Complex.FromPolarCoordinates(radius, start));
+        Span<Vector256<double>> work = stackalloc Vector256<double>[Stepper.Workspace];
         for (int i = 0; i < steps; i++)
         {
             node = stepper.Step(node, radius * arc / steps, 1, work, out _);
