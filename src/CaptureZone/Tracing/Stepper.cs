@@ -1,4 +1,6 @@
 using System.Numerics;
+using System.Runtime.CompilerServices;
+using System.Runtime.InteropServices;
 using System.Runtime.Intrinsics;
 using CaptureZone.Aquifers;
 using CaptureZone.Flow;
@@ -47,6 +49,17 @@ internal readonly struct Stepper(FlowField field, double sign, double tolerance)
         Node next = Step(from, step, clearance, work, confined, out error);
         return confined && !_aquifer.IsConfined(next.Potential) ? Step(from, step, clearance, work, false, out error) : next;
     }
+
+    /// <summary>A way so short that it is straight.</summary>
+    /// <param name="node">Where it starts.</param>
+    /// <param name="step">Its arc length, m; negative to go back.</param>
+    internal Node Straight(in Node node, double step) => node with
+    {
+        At = node.At + step * node.Direction,
+        Time = node.Time + step * node.Slowness,
+        Length = node.Length + step,
+        Potential = node.Potential - _sign * step * node.Speed,
+    };
 
     private Node Step(
         in Node from, double step, double clearance, Span<Vector256<double>> work, bool confined, out double error)
@@ -104,14 +117,17 @@ internal readonly struct Stepper(FlowField field, double sign, double tolerance)
     /// <summary>Even and odd stages are summed apart, so that the additions need not wait for each other.</summary>
     private static Vector256<double> Weighted(ReadOnlySpan<double> weights, ReadOnlySpan<Vector256<double>> rates)
     {
+        ref double weight = ref MemoryMarshal.GetReference(weights);
+        ref Vector256<double> rate = ref MemoryMarshal.GetReference(rates[..weights.Length]);
         Vector256<double> even = Vector256<double>.Zero, odd = Vector256<double>.Zero;
-        for (int j = 0; j + 1 < weights.Length; j += 2)
+        int j = 0;
+        for (; j + 1 < weights.Length; j += 2)
         {
-            even += weights[j] * rates[j];
-            odd += weights[j + 1] * rates[j + 1];
+            even += Unsafe.Add(ref weight, j) * Unsafe.Add(ref rate, j);
+            odd += Unsafe.Add(ref weight, j + 1) * Unsafe.Add(ref rate, j + 1);
         }
 
-        return weights.Length % 2 == 0 ? even + odd : even + odd + weights[^1] * rates[weights.Length - 1];
+        return j == weights.Length ? even + odd : even + odd + Unsafe.Add(ref weight, j) * Unsafe.Add(ref rate, j);
     }
 
     private static double Error(double high, double low, double step, double allowed)

@@ -48,7 +48,7 @@ public readonly record struct PathEnd(Complex At, Fate Fate, double Time, double
 public sealed class Tracer
 {
     /// <summary>Tolerance with which times err by less than 1e-8 of themselves and streamlines by less than 1e-8 of the total rate.</summary>
-    public const double FineTolerance = 1e-8;
+    public const double FineTolerance = 2e-8;
 
     /// <summary>Tolerance for fates and outlines, which are told apart or drawn to some 1e-4.</summary>
     public const double RoughTolerance = 1e-6;

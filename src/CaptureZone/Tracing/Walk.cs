@@ -223,36 +223,27 @@ internal ref struct Walk
     }
 
     /// <summary>
-    /// Cuts a step to where what remains before a mark is zero, by regula falsi with the Illinois rule (an end kept twice counts
-    /// half); every trial is a step of its own, so that the end is as exact as the method.
+    /// Cuts a step to where what remains before a mark is zero: Newton's method within a bracket, every trial a step of its own, so that
+    /// the end is as exact as the method; the last correction, too short for any error, goes straight on.
     /// </summary>
     private readonly void Cut(ref Node next, in Mark mark, Span<Vector256<double>> work)
     {
         double low = 0, atLow = mark.Remaining(_node), high = next.Length - _node.Length, atHigh = mark.Remaining(next);
-        double enough = Mark.Enough * (atLow - atHigh);
-        bool keptHigh = false, keptLow = false;
-        for (int i = 0; i < Mark.MostTrials && atLow > 0 && high > low; i++)
+        double straight = Mark.StraightShare * high;
+        double trial = high * (atLow / (atLow - atHigh));
+        for (int i = 0; i < Mark.MostTrials && atLow > 0 && trial > low && trial < high; i++)
         {
-            double trial = low + (high - low) * (atLow / (atLow - atHigh));
             next = _stepper.Step(_node, trial, 1, work, out _);
-            double left = mark.Remaining(next);
-            if (Math.Abs(left) <= enough)
+            double left = mark.Remaining(next), ahead = left / mark.Rate(next);
+            if (Math.Abs(ahead) <= straight)
             {
+                next = _stepper.Straight(next, ahead);
                 return;
             }
 
-            if (left > 0)
-            {
-                (low, atLow) = (trial, left);
-                atHigh = keptHigh ? atHigh / 2 : atHigh;
-                (keptHigh, keptLow) = (true, false);
-            }
-            else
-            {
-                (high, atHigh) = (trial, left);
-                atLow = keptLow ? atLow / 2 : atLow;
-                (keptHigh, keptLow) = (false, true);
-            }
+            (low, high) = left > 0 ? (trial, high) : (low, trial);
+            trial += ahead;
+            trial = trial > low && trial < high ? trial : (low + high) / 2;
         }
     }
 }
