@@ -47,15 +47,18 @@ internal readonly struct PathVertices(FlowField field, double sign, IPathSink? s
         _sink.Add(to.At, to.Time);
     }
 
-    /// <summary>A chord of length l on an arc that turns by a cuts off about |Q| l a / 8 on each half.</summary>
+    /// <summary>
+    /// A chord of length l on an arc that turns by a cuts off about |Q| l a / 8 on each half. The step is divided as the more
+    /// demanding of its ends asks.
+    /// </summary>
     private int Parts(in Node from, in Node to, double step, Complex bendFrom, Complex bendTo)
     {
         double turn = Math.Max(
             step * (Complex.Abs(bendFrom) + Complex.Abs(bendTo)) / 2,
             Complex.Abs(to.Direction - from.Direction));
         double leak = Math.Max(from.Speed, to.Speed) * step * turn / 8;
-        PathResolution resolution = _sink!.ResolutionAt(from.At);
-        double parts = Math.Max(turn / resolution.Turn, Math.Sqrt(leak / resolution.Leak));
+        PathResolution start = _sink!.ResolutionAt(from.At), end = _sink.ResolutionAt(to.At);
+        double parts = Math.Max(turn / Math.Min(start.Turn, end.Turn), Math.Sqrt(leak / Math.Min(start.Leak, end.Leak)));
         return (int)Math.Clamp(Math.Ceiling(parts), 1, MostPerStep);
     }
 

@@ -8,7 +8,7 @@ namespace CaptureZone.Tracing;
 internal ref struct Walk
 {
     /// <summary>Longest step, as a share of the distance to the nearest singular place.</summary>
-    private const double ShareOfSingular = 0.7;
+    private const double ShareOfSingular = 0.5;
 
     /// <summary>Longest step, as a share of the distance to the nearest stagnation point, where the direction jumps.</summary>
     private const double ShareOfStagnation = 0.5;

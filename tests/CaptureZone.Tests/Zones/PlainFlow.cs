@@ -16,6 +16,7 @@ public sealed class PlainFlow
 
     private const double StepShare = 0.12;
     private const double LongestStepShare = 0.6;
+    private const double TrapMargin = 1.2;
     private const int MostSteps = 200_000;
 
     private readonly double[] _x, _y, _strength, _trap;
@@ -117,18 +118,21 @@ public sealed class PlainFlow
             : net < 0 ? _radius + total * _radius / (0.9 * -net) : double.PositiveInfinity;
     }
 
-    /// <summary>
-    /// A radius within which all water moves toward a well: its own flow s / r is above what all else can make there.
-    /// </summary>
+    /// <summary>A radius within which all water moves toward a well: its own flow s / r is above what all else can make there.</summary>
     private double Trap(int j)
     {
-        double trap = Enumerable.Range(0, _x.Length).Where(k => k != j).Select(k => Between(j, k)).DefaultIfEmpty(double.PositiveInfinity).Min() / 2;
-        while (double.IsFinite(trap) && _strength[j] / trap < 1.2 * Others(j, trap))
+        if (_strength[j] < 0)
         {
-            trap /= 1.2;
+            return 0;
         }
 
-        return double.IsFinite(trap) ? trap : Math.Max(_strength[j], 0) / (1.2 * Others(j, 0) + 1e-9);
+        double trap = Enumerable.Range(0, _x.Length).Where(k => k != j).Select(k => Between(j, k)).DefaultIfEmpty(1e6).Min() / 2;
+        while (_strength[j] / trap < TrapMargin * Others(j, trap))
+        {
+            trap /= TrapMargin;
+        }
+
+        return trap;
     }
 
     private double Others(int j, double within)

@@ -20,6 +20,9 @@ internal sealed class RayFan
     /// <summary>Fronts of neighbours this close need no ray between, as a share of the zone's radius.</summary>
     private const double CloseShare = 0.02;
 
+    /// <summary>A ray between tells whether a front is flat when it meets it no farther from the middle, as a share of the chord.</summary>
+    private const double MostOffMiddle = 0.3;
+
     /// <summary>Fronts of neighbours are never farther apart than this, as a share of the zone's radius.</summary>
     private const double FarShare = 0.25;
 
@@ -42,6 +45,9 @@ internal sealed class RayFan
 
     /// <summary>Error of the water's volume between two neighbours that needs no ray between, as a share of rate x time.</summary>
     private const double VolumeShare = 1e-5;
+
+    /// <summary>Trials to launch a ray beside a side, each half as far from the other neighbour as the one before.</summary>
+    private const int MostRetreats = 12;
 
     /// <summary>Divisions after which what double precision tells apart has been reached.</summary>
     private const int MostDivisions = 64;
@@ -168,7 +174,8 @@ internal sealed class RayFan
 
         Complex to = middle.Fronts[index] - a.Fronts[index];
         double share = length > 0 ? Math.Clamp((to * Complex.Conjugate(chord)).Real / (length * length), 0, 1) : 0;
-        return Complex.Abs(to - share * chord) <= Flatness * _radii[index]
+        return (IsClose(a, b, index) || Math.Abs(share - 0.5) <= MostOffMiddle)
+            && Complex.Abs(to - share * chord) <= Flatness * _radii[index]
             && VolumeDiffers(a, middle, index) + VolumeDiffers(middle, b, index) <= 4 * VolumeShare;
     }
 
@@ -207,12 +214,33 @@ internal sealed class RayFan
     {
         Ray? middle = b.Angle - a.Angle > FineAngle
             ? _tracing.FromScreen((a.Angle + b.Angle) / 2)
-            : LaunchBetween(a, b) is { } launch ? _tracing.Through(launch) : null;
+            : WherePartedLittle(a, b) is var (first, second) ? Launched(a.Side is null ? first : second, a.Side is null ? second : first) : null;
         return middle is null ? null : middle with { Angle = Unwrapped(middle.Angle, a.Angle, b.Angle) };
     }
 
-    /// <summary>The middle between two neighbours, the first place from the well outward where they are far enough apart.</summary>
-    private Complex? LaunchBetween(Ray a, Ray b)
+    /// <summary>
+    /// The ray through the middle of two places on neighbours. Beside a side the middle may lie beyond it, where water goes
+    /// elsewhere: then closer to the other neighbour, whose water comes to the well for certain.
+    /// </summary>
+    /// <param name="inner">A place on a neighbour that is no side, m.</param>
+    /// <param name="outer">A place on the other neighbour, m.</param>
+    private Ray? Launched(Complex inner, Complex outer)
+    {
+        Complex apart = outer - inner;
+        for (int i = 0; i < MostRetreats; i++)
+        {
+            apart /= 2;
+            if (_tracing.Through(inner + apart) is { } ray)
+            {
+                return ray;
+            }
+        }
+
+        return null;
+    }
+
+    /// <summary>Places on two neighbours, the first from the well outward where these are far enough apart.</summary>
+    private (Complex First, Complex Second)? WherePartedLittle(Ray a, Ray b)
     {
         double apart = LaunchShare * _radii[0];
         double[] times = [.. a.Course.Concat(b.Course).Select(point => point.Time).Where(time => time > 0 && double.IsFinite(time)).Order()];
@@ -223,7 +251,7 @@ internal sealed class RayFan
                 Complex first = _tracing.PlaceAt(a, times[i]), second = _tracing.PlaceAt(b, times[i]);
                 if (Complex.Abs(first - second) >= LeastApart * apart)
                 {
-                    return (first + second) / 2;
+                    return (first, second);
                 }
 
                 i += stride;
