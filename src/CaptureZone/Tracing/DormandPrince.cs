@@ -10,9 +10,6 @@ internal static class DormandPrince
     /// <summary>How many stages a step takes.</summary>
     internal const int Stages = 12;
 
-    /// <summary>Order of the method, for the choice of steps.</summary>
-    internal const int Order = 8;
-
     /// <summary>Nodes c: stage i stands at c[i] x step.</summary>
     internal static ReadOnlySpan<double> C =>
     [

@@ -11,6 +11,12 @@ internal enum MarkKind
     /// <summary>The water table meets the base.</summary>
     Base,
 
+    /// <summary>The head falls to the aquifer's top.</summary>
+    TopFromAbove,
+
+    /// <summary>The head rises to the aquifer's top.</summary>
+    TopFromBelow,
+
     /// <summary>A time is up.</summary>
     Time,
 }
@@ -18,7 +24,7 @@ internal enum MarkKind
 /// <summary>Something at which a path must end exactly.</summary>
 /// <param name="Kind">What it is.</param>
 /// <param name="Centre">The circle's centre, m.</param>
-/// <param name="Value">The circle's radius, m, or the time, d.</param>
+/// <param name="Value">The circle's radius, m, the potential at the top, m3/d, or the time, d.</param>
 internal readonly record struct Mark(MarkKind Kind, Complex Centre, double Value)
 {
     /// <summary>A way this short, as a share of the last step, is straight to all digits: the error is of its square.</summary>
@@ -33,6 +39,8 @@ internal readonly record struct Mark(MarkKind Kind, Complex Centre, double Value
     {
         MarkKind.Circle => Complex.Abs(node.At - Centre) - Value,
         MarkKind.Base => node.Potential,
+        MarkKind.TopFromAbove => node.Potential - Value,
+        MarkKind.TopFromBelow => Value - node.Potential,
         _ => Value - node.Time,
     };
 
@@ -41,7 +49,7 @@ internal readonly record struct Mark(MarkKind Kind, Complex Centre, double Value
     internal double Rate(in Node node) => Kind switch
     {
         MarkKind.Circle => -((node.At - Centre) * Complex.Conjugate(node.Direction)).Real / Complex.Abs(node.At - Centre),
-        MarkKind.Base => node.Speed,
+        MarkKind.Base or MarkKind.TopFromAbove or MarkKind.TopFromBelow => node.Speed,
         _ => node.Slowness,
     };
 }

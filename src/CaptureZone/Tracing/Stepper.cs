@@ -37,18 +37,20 @@ internal readonly struct Stepper(FlowField field, double sign, double tolerance)
         return NodeOf(at, 0, 0, flow.Discharge, flow.Potential);
     }
 
-    /// <summary>One step.</summary>
-    /// <param name="from">Where it starts.</param>
-    /// <param name="step">Its arc length, m.</param>
-    /// <param name="clearance">Distance to the nearest singular place, m.</param>
-    /// <param name="work">Space for the stages.</param>
-    /// <param name="error">Its error over the error allowed; not a number when it met a stagnation point.</param>
-    internal Node Step(in Node from, double step, double clearance, Span<Vector256<double>> work, out double error)
+    /// <summary>Where the head reaches or leaves the aquifer's top within a step; null where it does not.</summary>
+    /// <param name="from">Start of the step.</param>
+    /// <param name="to">Its end.</param>
+    internal Mark? TopBetween(in Node from, in Node to) =>
+        _aquifer.IsConfined(from.Potential) == _aquifer.IsConfined(to.Potential)
+            ? null
+            : new Mark(_sign > 0 ? MarkKind.TopFromAbove : MarkKind.TopFromBelow, default, _aquifer.PotentialAtTop);
+
+    /// <summary>A node at the aquifer's top, on the side to which the path goes.</summary>
+    /// <param name="node">The node.</param>
+    internal Node PastTop(in Node node) => node with
     {
-        bool confined = _aquifer.IsConfined(from.Potential);
-        Node next = Step(from, step, clearance, work, confined, out error);
-        return confined && !_aquifer.IsConfined(next.Potential) ? Step(from, step, clearance, work, false, out error) : next;
-    }
+        Potential = _sign > 0 ? Math.BitDecrement(_aquifer.PotentialAtTop) : _aquifer.PotentialAtTop,
+    };
 
     /// <summary>A way so short that it is straight.</summary>
     /// <param name="node">Where it starts.</param>
@@ -61,9 +63,15 @@ internal readonly struct Stepper(FlowField field, double sign, double tolerance)
         Potential = node.Potential - _sign * step * node.Speed,
     };
 
-    private Node Step(
-        in Node from, double step, double clearance, Span<Vector256<double>> work, bool confined, out double error)
+    /// <summary>One step, confined or not all along as its start is.</summary>
+    /// <param name="from">Where it starts.</param>
+    /// <param name="step">Its arc length, m.</param>
+    /// <param name="clearance">Distance to the nearest singular place, m.</param>
+    /// <param name="work">Space for the stages.</param>
+    /// <param name="error">Its error over the error allowed; not a number when it met a stagnation point.</param>
+    internal Node Step(in Node from, double step, double clearance, Span<Vector256<double>> work, out double error)
     {
+        bool confined = _aquifer.IsConfined(from.Potential);
         work[0] = Vector256.Create(from.Direction.Real, from.Direction.Imaginary, from.Slowness, -_sign * from.Speed);
         for (int stage = 1; stage < DormandPrince.Stages; stage++)
         {
@@ -87,7 +95,7 @@ internal readonly struct Stepper(FlowField field, double sign, double tolerance)
 
     private Node NodeOf(Complex at, double time, double length, Complex discharge, double potential)
     {
-        double speed = Complex.Abs(discharge);
+        double speed = Math.Sqrt(discharge.Real * discharge.Real + discharge.Imaginary * discharge.Imaginary);
         double slowness = _aquifer.Porosity * _aquifer.SaturatedThickness(potential) / speed;
         return new Node(at, time, length, discharge * (_sign / speed), speed, slowness, potential);
     }

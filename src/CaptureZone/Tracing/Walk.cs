@@ -81,6 +81,13 @@ internal ref struct Walk
                 continue;
             }
 
+            if (_stepper.TopBetween(_node, next) is { } top)
+            {
+                // The thickness has a kink there, which no step of high order may straddle.
+                Cut(ref next, top, work);
+                next = _stepper.PastTop(next);
+            }
+
             Fate? fate = FateOnTheWay(ref next, work);
             Accept(next);
             if (fate is { } end)
@@ -94,8 +101,9 @@ internal ref struct Walk
         throw new InvalidOperationException("A path took more steps than any path takes.");
     }
 
+    /// <summary>The error grows with the eighth power of the step, the method being of that order.</summary>
     private static double Factor(double error) =>
-        Math.Clamp(Safety * Math.Pow(error, -1.0 / DormandPrince.Order), 1 / MostGrowth, MostGrowth);
+        Math.Clamp(Safety / Math.Sqrt(Math.Sqrt(Math.Sqrt(error))), 1 / MostGrowth, MostGrowth);
 
     private readonly PathEnd End(Fate fate)
     {
@@ -187,7 +195,7 @@ internal ref struct Walk
     private readonly Fate? FarFate(in Node node)
     {
         Complex ray = node.At - _stops.Centre;
-        double distance = Complex.Abs(ray);
+        double distance = Norm(ray);
         if (distance >= _stops.InfinityRadius)
         {
             return new Fate(FateKind.Far);
@@ -202,6 +210,8 @@ internal ref struct Walk
         return outward > OutwardCosine ? new Fate(FateKind.Far) : null;
     }
 
+    private static double Norm(Complex z) => Math.Sqrt(z.Real * z.Real + z.Imaginary * z.Imaginary);
+
     private static bool IsWithin(Complex at, Complex centre, double radius)
     {
         double dx = at.Real - centre.Real, dy = at.Imaginary - centre.Imaginary;
@@ -211,7 +221,7 @@ internal ref struct Walk
     private readonly double LongestStep(out double clearance)
     {
         clearance = Math.Min(
-            _field.DistanceToSingular(_node.At), Complex.Abs(_node.At - _stops.Centre) + _stops.Diameter);
+            _field.DistanceToSingular(_node.At), Norm(_node.At - _stops.Centre) + _stops.Diameter);
         double nearest = double.PositiveInfinity;
         foreach (ref readonly Snare snare in _snares)
         {

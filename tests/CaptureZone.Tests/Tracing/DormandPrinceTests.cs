@@ -12,6 +12,9 @@ namespace CaptureZone.Tests.Tracing;
 /// </summary>
 public sealed class DormandPrinceTests
 {
+    /// <summary>Order of the method.</summary>
+    private const int Order = 8;
+
     /// <summary>Rounding of the sums, whose terms reach 43.</summary>
     private const double Rounding = 1e-13;
 
@@ -37,7 +40,7 @@ public sealed class DormandPrinceTests
     [Fact]
     public void All_200_order_conditions_up_to_order_8_hold()
     {
-        Tree[] trees = [.. Enumerable.Range(1, DormandPrince.Order).SelectMany(TreesOf)];
+        Tree[] trees = [.. Enumerable.Range(1, Order).SelectMany(TreesOf)];
         Assert.Equal(200, trees.Length);
         foreach (Tree tree in trees)
         {
