@@ -152,10 +152,11 @@ public sealed class OutlineTests
     {
         Envelope box = zone.EnvelopeInternal.Copy();
         box.ExpandBy(4 * near);
+        IndexedPointInAreaLocator locator = new(zone);
+        locator.Locate(box.Centre);
         int[] wrong = new int[Grid];
         new ThreadWorkers(2).For(Grid, row =>
         {
-            IndexedPointInAreaLocator locator = new(zone);
             for (int column = 0; column < Grid; column++)
             {
                 Coordinate at = new(box.MinX + box.Width * (column + 0.5) / Grid, box.MinY + box.Height * (row + 0.5) / Grid);
