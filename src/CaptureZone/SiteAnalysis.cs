@@ -53,18 +53,32 @@ public static class SiteAnalysis
         bool IsContainment(Fate fate) => fate.Kind == FateKind.Well && ServesContainment(topology, fate.Feature);
         Geometry joint = map.ZoneOf(IsContainment);
 
-        progress?.Report(new Step("travel-time zones", 0.5));
-        WellAnswer[] wells = WellAnswers(topology, map, levels, questions, framing, workers, cancel);
-
-        progress?.Report(new Step("plumes", 0.8));
+        progress?.Report(new Step("travel-time zones, plumes and heads", 0.5));
+        KnownHeadInfluence? knownHead = KnownHeadInfluence.Of(levels, field);
+        Geometry extent = GeometryKit.Factory.ToGeometry(framing.Extent);
+        WellAnswer[] wells = new WellAnswer[field.System.Wells.Length];
         PlumeAnswer[] plumes = new PlumeAnswer[questions.Plumes.Length];
-        workers.For(plumes.Length, i =>
-            plumes[i] = PlumeJudge.Judge(topology, map, joint, i, questions.Plumes[i], IsContainment));
+        HeadContourMap? contours = null;
+        workers.For(wells.Length + plumes.Length + 1, part =>
+        {
+            cancel.ThrowIfCancellationRequested();
+            int plume = part - wells.Length;
+            if (plume < 0)
+            {
+                wells[part] = AnswerOf(part, topology, map, levels, questions, extent);
+            }
+            else if (plume < plumes.Length)
+            {
+                plumes[plume] = PlumeJudge.Judge(topology, map, joint, plume, questions.Plumes[plume], IsContainment);
+            }
+            else
+            {
+                contours = HeadContours.Find(field, framing.Extent, questions.HeadUnit);
+            }
+        });
         cancel.ThrowIfCancellationRequested();
 
-        progress?.Report(new Step("heads and checks", 0.9));
-        KnownHeadInfluence? knownHead = KnownHeadInfluence.Of(levels, field);
-        HeadContourMap contours = HeadContours.Find(field, framing.Extent, questions.HeadUnit);
+        progress?.Report(new Step("checks", 0.9));
         return new SiteAnswers
         {
             Field = field,
@@ -76,7 +90,7 @@ public static class SiteAnalysis
             ContainmentZone = joint,
             Plumes = [.. plumes],
             Paths = ReportedPaths.Of(topology, questions.Plumes),
-            Contours = contours.Contours,
+            Contours = contours!.Contours,
             ContourInterval = contours.Interval,
             Arrows = FlowArrows.Sample(field, framing.Extent, ArrowsAcross),
             Checks = SelfChecks.Of(topology, map, framing.Extent, wells, plumes, workers),
@@ -101,33 +115,23 @@ public static class SiteAnalysis
         return wells.Any(other => other.At == wells[well].At && other.Purpose == WellPurpose.Containment);
     }
 
-    private static WellAnswer[] WellAnswers(
-        FlowTopology topology,
-        FaceMap map,
-        ScreenLevels levels,
-        Questions questions,
-        Framing framing,
-        IWorkers workers,
-        CancellationToken cancel)
+    private static WellAnswer AnswerOf(
+        int index, FlowTopology topology, FaceMap map, ScreenLevels levels, Questions questions, Geometry extent)
     {
-        Geometry extent = GeometryKit.Factory.ToGeometry(framing.Extent);
-        WellAnswer[] answers = new WellAnswer[topology.Field.System.Wells.Length];
-        workers.For(answers.Length, i =>
+        double rate = topology.Field.Parameters.Rates[index];
+        if (!(rate > 0) || ScreenOf(topology, topology.Field.System.Wells[index]) is not { } screen)
         {
-            cancel.ThrowIfCancellationRequested();
-            Well well = topology.Field.System.Wells[i];
-            double rate = topology.Field.Parameters.Rates[i];
-            Screen? screen = rate > 0 ? ScreenOf(topology, well) : null;
-            ImmutableArray<ScreenStretch> stretches = screen is { } sink ? WaterOrigins.Stretches(topology, sink) : [];
-            answers[i] = new WellAnswer(
-                i,
-                levels.Head(i),
-                levels.Drawdown(i),
-                rate > 0 ? levels.LargestRate(i) : null,
-                screen is { } zoned ? WellZones.Of(topology, map, zoned, stretches, extent) : null,
-                screen is { } timed ? TravelTimeZones.Of(topology, timed, stretches, questions.TravelTimes) : []);
-        });
-        return answers;
+            return new WellAnswer(index, levels.Head(index), levels.Drawdown(index), rate > 0 ? levels.LargestRate(index) : null, null, []);
+        }
+
+        ImmutableArray<ScreenStretch> stretches = WaterOrigins.Stretches(topology, screen);
+        return new WellAnswer(
+            index,
+            levels.Head(index),
+            levels.Drawdown(index),
+            levels.LargestRate(index),
+            WellZones.Of(topology, map, screen, stretches, extent),
+            TravelTimeZones.Of(topology, screen, stretches, questions.TravelTimes));
     }
 
     private static Screen? ScreenOf(FlowTopology topology, Well well)

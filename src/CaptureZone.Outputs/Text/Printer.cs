@@ -176,8 +176,13 @@ public sealed class Printer(ReportUnits units)
         return isZero ? "0" : text;
     }
 
-    private static string Trimmed(string number) =>
-        number.Contains('.', StringComparison.Ordinal) && !number.Contains('e', StringComparison.Ordinal)
-            ? number.TrimEnd('0').TrimEnd('.')
+    /// <summary>A number without the zeros that end its decimals, before its exponent if it has one.</summary>
+    private static string Trimmed(string number)
+    {
+        int exponent = number.IndexOf('e', StringComparison.Ordinal);
+        string figures = exponent < 0 ? number : number[..exponent];
+        return figures.Contains('.', StringComparison.Ordinal)
+            ? figures.TrimEnd('0').TrimEnd('.') + number[figures.Length..]
             : number;
+    }
 }

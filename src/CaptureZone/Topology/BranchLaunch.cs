@@ -18,6 +18,11 @@ internal static class BranchLaunch
     /// <summary>Corrections that put the launch on the dividing streamline.</summary>
     private const int Corrections = 4;
 
+    /// <summary>
+    /// A correction by more than this share of the launch's distance is rounding of the flow: so near to the point a streamline is straight.
+    /// </summary>
+    private const double MostShiftShare = 0.05;
+
     /// <summary>Flow by which a companion stands off a branch, as a share of the total rate: well above what makes a connection.</summary>
     private const double CompanionShare = 1e-7;
 
@@ -92,10 +97,14 @@ internal static class BranchLaunch
         {
             Complex discharge = field.DischargeAt(launch);
             double between = field.FluxAcross(point, launch);
-            double speed = Complex.Abs(discharge);
+            double speed = Complex.Abs(discharge), shift = between / speed;
+            if (!(Math.Abs(shift) <= MostShiftShare * Complex.Abs(launch - point)))
+            {
+                break;
+            }
 
             // The flow across the segment grows by |Q| for each metre that the launch lies to the left of the streamline.
-            launch -= Complex.ImaginaryOne * discharge / speed * (between / speed);
+            launch -= Complex.ImaginaryOne * discharge / speed * shift;
         }
 
         return launch;

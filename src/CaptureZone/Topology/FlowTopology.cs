@@ -21,11 +21,15 @@ public sealed class FlowTopology
     private FlowTopology(Tracer tracer, ImmutableArray<DividingBranch> branches)
     {
         Tracer = tracer;
+        Scout = new Tracer(tracer.Stops, Tracer.RoughTolerance);
         Branches = branches;
     }
 
     /// <summary>Follows paths among these stagnation points.</summary>
     public Tracer Tracer { get; }
+
+    /// <summary>The same, roughly, for many paths of which only fates, or times to some 1e-4, are wanted.</summary>
+    public Tracer Scout { get; }
 
     /// <summary>The field.</summary>
     public FlowField Field => Tracer.Stops.Field;
@@ -51,13 +55,13 @@ public sealed class FlowTopology
     public static FlowTopology Find(
         FlowField field, double reach, Envelope extent, IWorkers workers, CancellationToken cancel)
     {
-        StagnationSet stagnation = StagnationFinder.Find(field);
-        PathStops stops = PathStops.Of(field, stagnation, reach);
-        Tracer tracer = new(stops);
+        PathStops stops = PathStops.Of(field, StagnationFinder.Find(field), reach);
+        ImmutableArray<StagnationPoint> points = stops.Stagnation.Points;
+        Tracer tracer = new(stops), beside = tracer.PastStagnation();
         List<(int Saddle, int Order, Complex Launch)> launches = [];
-        for (int i = 0; i < stagnation.Points.Length; i++)
+        for (int i = 0; i < points.Length; i++)
         {
-            Complex[] of = BranchLaunch.Of(field, stagnation.Points, i);
+            Complex[] of = BranchLaunch.Of(field, points, i);
             launches.AddRange(of.Select((launch, order) => (i, order, launch)));
         }
 
@@ -66,7 +70,7 @@ public sealed class FlowTopology
         workers.For(branches.Length, i =>
         {
             cancel.ThrowIfCancellationRequested();
-            branches[i] = Follow(tracer, launches[i].Saddle, launches[i].Order, launches[i].Launch, coarse);
+            branches[i] = Follow(tracer, beside, launches[i].Saddle, launches[i].Order, launches[i].Launch, coarse);
         });
         double[] fineness = BranchFineness.Of(stops, branches, extent);
         workers.For(branches.Length, i =>
@@ -95,7 +99,12 @@ public sealed class FlowTopology
 
     private int CountAt(int saddle) => 2 * (Points[saddle].Multiplicity + 1);
 
-    private static DividingBranch Follow(Tracer tracer, int saddle, int order, Complex launch, double coarse)
+    /// <summary>
+    /// Follows a branch, and the water on its two sides: so near to the branch that where it meets another stagnation point that water
+    /// passes by.
+    /// </summary>
+    private static DividingBranch Follow(
+        Tracer tracer, Tracer beside, int saddle, int order, Complex launch, double coarse)
     {
         PathStops stops = tracer.Stops;
         bool stable = order % 2 != 0;
@@ -110,7 +119,7 @@ public sealed class FlowTopology
         {
             Complex companion = BranchLaunch.Companion(
                 stops.Field, stops.Stagnation.Points[saddle].At, launch, stops.TotalRate, side);
-            return tracer.Trace(companion, back, double.PositiveInfinity, null).Fate;
+            return beside.Trace(companion, back, double.PositiveInfinity, null).Fate;
         }
     }
 

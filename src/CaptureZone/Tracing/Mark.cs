@@ -21,8 +21,8 @@ internal enum MarkKind
 /// <param name="Value">The circle's radius, m, or the time, d.</param>
 internal readonly record struct Mark(MarkKind Kind, Complex Centre, double Value)
 {
-    /// <summary>An end is exact when this share of the last step remains.</summary>
-    internal const double Enough = 1e-13;
+    /// <summary>A way this short, as a share of the last step, is straight to all digits: the error is of its square.</summary>
+    internal const double StraightShare = 1e-7;
 
     /// <summary>Trials after which what double precision gives has been reached.</summary>
     internal const int MostTrials = 30;
@@ -34,5 +34,14 @@ internal readonly record struct Mark(MarkKind Kind, Complex Centre, double Value
         MarkKind.Circle => Complex.Abs(node.At - Centre) - Value,
         MarkKind.Base => node.Potential,
         _ => Value - node.Time,
+    };
+
+    /// <summary>By how much less remains for each metre along the path.</summary>
+    /// <param name="node">The particle.</param>
+    internal double Rate(in Node node) => Kind switch
+    {
+        MarkKind.Circle => -((node.At - Centre) * Complex.Conjugate(node.Direction)).Real / Complex.Abs(node.At - Centre),
+        MarkKind.Base => node.Speed,
+        _ => node.Slowness,
     };
 }

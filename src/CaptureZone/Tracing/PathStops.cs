@@ -31,6 +31,9 @@ public sealed class PathStops
     /// <summary>What lies beyond this many site diameters counts as at infinity.</summary>
     private const double InfinityInDiameters = 1e6;
 
+    /// <summary>A site is taken to be at least this wide, m: the bore of a lone well says nothing of how far its water comes.</summary>
+    private const double LeastDiameter = 1;
+
     /// <summary>The circle at which paths end is larger than the reach that is asked for by this factor.</summary>
     private const double ReachMargin = 1.5;
 
@@ -40,7 +43,8 @@ public sealed class PathStops
         Stagnation = stagnation;
         Screens = [.. screens];
         Centre = screens.Length == 0 ? field.Parameters.Regional.HeadAt : Mean(screens);
-        Diameter = 2 * screens.Select(screen => Complex.Abs(screen.At - Centre) + screen.Radius).DefaultIfEmpty(1).Max();
+        Diameter = Math.Max(
+            LeastDiameter, 2 * screens.Select(screen => Complex.Abs(screen.At - Centre) + screen.Radius).DefaultIfEmpty().Max());
         FarRadius = Math.Max(FarRadiusOf(field), ReachMargin * reach);
         TotalRate = screens.Sum(screen => Math.Abs(screen.Rate));
     }
@@ -48,7 +52,7 @@ public sealed class PathStops
     /// <summary>The field.</summary>
     public FlowField Field { get; }
 
-    /// <summary>Its stagnation points.</summary>
+    /// <summary>Its stagnation points, those that no path can tell apart taken together.</summary>
     public StagnationSet Stagnation { get; }
 
     /// <summary>The screens of wells that run, wells at one place taken together.</summary>
@@ -96,8 +100,9 @@ public sealed class PathStops
         }
 
         Screen[] running = [.. merged.Where(screen => screen.Rate != 0)];
-        Screen[] cleared = [.. running.Select(screen => screen with { Radius = EndRadius(screen, running, stagnation) })];
-        return new PathStops(field, stagnation, cleared, reach);
+        StagnationSet joined = CloseStagnation.Joined(field, stagnation, running.Sum(screen => Math.Abs(screen.Rate)));
+        Screen[] cleared = [.. running.Select(screen => screen with { Radius = EndRadius(screen, running, joined) })];
+        return new PathStops(field, joined, cleared, reach);
     }
 
     private static double EndRadius(Screen screen, Screen[] all, StagnationSet stagnation)

@@ -15,6 +15,9 @@ internal readonly record struct Snare(Complex At, double Radius, int Index)
     /// <summary>Distance at which the flow near the point is probed, as a share of that to the nearest singular place.</summary>
     private const double ProbeShare = 1e-3;
 
+    /// <summary>A path has met the point only when it is nearer to it than this share of the distance to the next one.</summary>
+    private const double ShareOfNext = 0.3;
+
     /// <summary>
     /// Near a point of multiplicity m the discharge is c d^m, so that a flow of c d^(m+1) / (m+1) passes between a streamline at
     /// distance d and those that end in the point.
@@ -24,10 +27,25 @@ internal readonly record struct Snare(Complex At, double Radius, int Index)
     /// <param name="index">Its index.</param>
     internal static Snare About(PathStops stops, StagnationPoint point, int index)
     {
-        double probe = ProbeShare * stops.Field.DistanceToSingular(point.At);
+        double probe = Math.Min(
+            ProbeShare * stops.Field.DistanceToSingular(point.At), ShareOfNext * DistanceToNext(stops.Stagnation, index));
         double speed = Complex.Abs(stops.Field.DischargeAt(point.At + probe));
         int power = point.Multiplicity + 1;
         double radius = probe * Math.Pow(ConnectionShare * stops.TotalRate * power / (speed * probe), 1.0 / power);
         return new Snare(point.At, Math.Min(radius, probe), index);
+    }
+
+    private static double DistanceToNext(StagnationSet stagnation, int index)
+    {
+        double nearest = double.PositiveInfinity;
+        for (int i = 0; i < stagnation.Points.Length; i++)
+        {
+            if (i != index)
+            {
+                nearest = Math.Min(nearest, Complex.Abs(stagnation.Points[i].At - stagnation.Points[index].At));
+            }
+        }
+
+        return nearest;
     }
 }

@@ -1,37 +1,40 @@
 using System.Numerics;
+using System.Runtime.CompilerServices;
+using System.Runtime.InteropServices;
+using System.Runtime.Intrinsics;
 using CaptureZone.Aquifers;
 using CaptureZone.Flow;
 
 namespace CaptureZone.Tracing;
 
-/// <summary>Takes single steps along paths: dz/ds = Q/|Q|, dt/ds = n h/|Q|.</summary>
+/// <summary>
+/// Takes single steps along paths: dz/ds = Q/|Q|, dt/ds = n h/|Q|, dPhi/ds = -|Q|. The four rates of a stage stand in one vector: x, y,
+/// time, potential.
+/// </summary>
 /// <param name="field">The field.</param>
 /// <param name="sign">1 with the water, -1 against it.</param>
-internal readonly struct Stepper(FlowField field, double sign)
+/// <param name="tolerance">
+/// Error allowed in a step, as a share of the distance to the nearest singular place (position) or of the time.
+/// </param>
+internal readonly struct Stepper(FlowField field, double sign, double tolerance)
 {
-    /// <summary>Error allowed in a step, as a share of the distance to the nearest singular place (position) or of the time.</summary>
-    private const double Tolerance = 1e-8;
-
     /// <summary>Weight of the error estimate of order 3 against that of order 5 (Hairer, Norsett and Wanner 1993, section II.10).</summary>
     private const double LowOrderWeight = 0.01;
 
+    /// <summary>Space that one step needs.</summary>
+    internal const int Workspace = DormandPrince.Stages;
+
     private readonly FlowField _field = field;
     private readonly double _sign = sign;
+    private readonly double _tolerance = tolerance;
     private readonly Aquifer _aquifer = field.Parameters.Aquifer;
 
-    /// <summary>Space that one step needs.</summary>
-    internal const int Workspace = 3 * DormandPrince.Stages;
-
-    /// <summary>The node at a place.</summary>
+    /// <summary>The node at which a path starts.</summary>
     /// <param name="at">The place, m.</param>
-    /// <param name="time">Time since the start, d.</param>
-    /// <param name="length">Arc length since the start, m.</param>
-    internal Node NodeAt(Complex at, double time, double length)
+    internal Node Start(Complex at)
     {
         FlowAt flow = _field.FlowAt(at);
-        double speed = Complex.Abs(flow.Discharge);
-        double slowness = _aquifer.Porosity * _aquifer.SaturatedThickness(flow.Potential) / speed;
-        return new Node(at, time, length, flow.Discharge * (_sign / speed), speed, slowness, flow.Potential);
+        return NodeOf(at, 0, 0, flow.Discharge, flow.Potential);
     }
 
     /// <summary>One step.</summary>
@@ -40,51 +43,56 @@ internal readonly struct Stepper(FlowField field, double sign)
     /// <param name="clearance">Distance to the nearest singular place, m.</param>
     /// <param name="work">Space for the stages.</param>
     /// <param name="error">Its error over the error allowed; not a number when it met a stagnation point.</param>
-    internal Node Step(in Node from, double step, double clearance, Span<double> work, out double error)
+    internal Node Step(in Node from, double step, double clearance, Span<Vector256<double>> work, out double error)
     {
         bool confined = _aquifer.IsConfined(from.Potential);
         Node next = Step(from, step, clearance, work, confined, out error);
         return confined && !_aquifer.IsConfined(next.Potential) ? Step(from, step, clearance, work, false, out error) : next;
     }
 
-    private Node Step(in Node from, double step, double clearance, Span<double> work, bool confined, out double error)
+    /// <summary>A way so short that it is straight.</summary>
+    /// <param name="node">Where it starts.</param>
+    /// <param name="step">Its arc length, m; negative to go back.</param>
+    internal Node Straight(in Node node, double step) => node with
     {
-        Span<double> kx = work[..DormandPrince.Stages];
-        Span<double> ky = work.Slice(DormandPrince.Stages, DormandPrince.Stages);
-        Span<double> kt = work[(2 * DormandPrince.Stages)..];
-        (kx[0], ky[0], kt[0]) = (from.Direction.Real, from.Direction.Imaginary, from.Slowness);
+        At = node.At + step * node.Direction,
+        Time = node.Time + step * node.Slowness,
+        Length = node.Length + step,
+        Potential = node.Potential - _sign * step * node.Speed,
+    };
+
+    private Node Step(
+        in Node from, double step, double clearance, Span<Vector256<double>> work, bool confined, out double error)
+    {
+        work[0] = Vector256.Create(from.Direction.Real, from.Direction.Imaginary, from.Slowness, -_sign * from.Speed);
         for (int stage = 1; stage < DormandPrince.Stages; stage++)
         {
-            ReadOnlySpan<double> a = DormandPrince.A(stage);
-            double x = 0, y = 0;
-            for (int j = 0; j < a.Length; j++)
-            {
-                x += a[j] * kx[j];
-                y += a[j] * ky[j];
-            }
-
-            Complex at = new(from.At.Real + step * x, from.At.Imaginary + step * y);
-            Stage(at, confined, out kx[stage], out ky[stage], out kt[stage]);
+            Vector256<double> moved = step * Weighted(DormandPrince.A(stage), work);
+            work[stage] = RatesAt(new Complex(from.At.Real + moved[0], from.At.Imaginary + moved[1]), confined);
         }
 
-        double dx = 0, dy = 0, dt = 0;
-        ReadOnlySpan<double> b = DormandPrince.B;
-        for (int j = 0; j < b.Length; j++)
-        {
-            dx += b[j] * kx[j];
-            dy += b[j] * ky[j];
-            dt += b[j] * kt[j];
-        }
-
-        Complex end = new(from.At.Real + step * dx, from.At.Imaginary + step * dy);
-        double time = from.Time + step * dt;
+        Vector256<double> order8 = Weighted(DormandPrince.B, work);
+        Vector256<double> change = step * order8;
+        Complex end = new(from.At.Real + change[0], from.At.Imaginary + change[1]);
+        double time = from.Time + change[2];
+        Vector256<double> high = Weighted(DormandPrince.E5, work);
+        Vector256<double> low = order8
+            - (DormandPrince.Bh[0] * work[0] + DormandPrince.Bh[1] * work[8] + DormandPrince.Bh[2] * work[11]);
+        double place = _tolerance * clearance;
         error = Math.Max(
-            Math.Max(Error(kx, step, Tolerance * clearance), Error(ky, step, Tolerance * clearance)),
-            Error(kt, step, Tolerance * time));
-        return NodeAt(end, time, from.Length + step);
+            Math.Max(Error(high[0], low[0], step, place), Error(high[1], low[1], step, place)),
+            Error(high[2], low[2], step, _tolerance * time));
+        return NodeOf(end, time, from.Length + step, _field.DischargeAt(end), from.Potential + change[3]);
     }
 
-    private void Stage(Complex at, bool confined, out double x, out double y, out double slowness)
+    private Node NodeOf(Complex at, double time, double length, Complex discharge, double potential)
+    {
+        double speed = Complex.Abs(discharge);
+        double slowness = _aquifer.Porosity * _aquifer.SaturatedThickness(potential) / speed;
+        return new Node(at, time, length, discharge * (_sign / speed), speed, slowness, potential);
+    }
+
+    private Vector256<double> RatesAt(Complex at, bool confined)
     {
         Complex discharge;
         double thickness;
@@ -100,23 +108,30 @@ internal readonly struct Stepper(FlowField field, double sign)
             thickness = _aquifer.SaturatedThickness(flow.Potential);
         }
 
-        double inverse = 1 / Math.Sqrt(discharge.Real * discharge.Real + discharge.Imaginary * discharge.Imaginary);
-        x = _sign * discharge.Real * inverse;
-        y = _sign * discharge.Imaginary * inverse;
-        slowness = _aquifer.Porosity * thickness * inverse;
+        double speed = Math.Sqrt(discharge.Real * discharge.Real + discharge.Imaginary * discharge.Imaginary);
+        double along = _sign / speed;
+        return Vector256.Create(
+            along * discharge.Real, along * discharge.Imaginary, _aquifer.Porosity * thickness / speed, -_sign * speed);
     }
 
-    private static double Error(ReadOnlySpan<double> k, double step, double allowed)
+    /// <summary>Even and odd stages are summed apart, so that the additions need not wait for each other.</summary>
+    private static Vector256<double> Weighted(ReadOnlySpan<double> weights, ReadOnlySpan<Vector256<double>> rates)
     {
-        double high = 0, low = 0;
-        ReadOnlySpan<double> b = DormandPrince.B, e5 = DormandPrince.E5, bh = DormandPrince.Bh;
-        for (int j = 0; j < k.Length; j++)
+        ref double weight = ref MemoryMarshal.GetReference(weights);
+        ref Vector256<double> rate = ref MemoryMarshal.GetReference(rates[..weights.Length]);
+        Vector256<double> even = Vector256<double>.Zero, odd = Vector256<double>.Zero;
+        int j = 0;
+        for (; j + 1 < weights.Length; j += 2)
         {
-            high += e5[j] * k[j];
-            low += b[j] * k[j];
+            even += Unsafe.Add(ref weight, j) * Unsafe.Add(ref rate, j);
+            odd += Unsafe.Add(ref weight, j + 1) * Unsafe.Add(ref rate, j + 1);
         }
 
-        low -= bh[0] * k[0] + bh[1] * k[8] + bh[2] * k[11];
+        return j == weights.Length ? even + odd : even + odd + Unsafe.Add(ref weight, j) * Unsafe.Add(ref rate, j);
+    }
+
+    private static double Error(double high, double low, double step, double allowed)
+    {
         double norm = Math.Sqrt(high * high + LowOrderWeight * low * low);
         return norm == 0 ? 0 : step * high * high / (norm * allowed);
     }

@@ -47,8 +47,15 @@ public readonly record struct PathEnd(Complex At, Fate Fate, double Time, double
 /// </summary>
 public sealed class Tracer
 {
+    /// <summary>Tolerance with which times err by less than 1e-8 of themselves and streamlines by less than 1e-8 of the total rate.</summary>
+    public const double FineTolerance = 2e-8;
+
+    /// <summary>Tolerance for fates and outlines, which are told apart or drawn to some 1e-4.</summary>
+    public const double RoughTolerance = 1e-6;
+
     private readonly PathStops _stops;
     private readonly Snare[] _snares;
+    private readonly double _tolerance;
 
     /// <summary>Prepares to follow paths in a field, finding its stagnation points first.</summary>
     /// <param name="field">The field.</param>
@@ -59,14 +66,28 @@ public sealed class Tracer
 
     /// <summary>Prepares to follow paths in a field.</summary>
     /// <param name="stops">The field and where paths in it end.</param>
-    public Tracer(PathStops stops)
+    /// <param name="tolerance">
+    /// Error allowed in a step, as a share of the distance to the nearest singular place (position) or of the time.
+    /// </param>
+    public Tracer(PathStops stops, double tolerance = FineTolerance)
     {
         _stops = stops;
+        _tolerance = tolerance;
         _snares = [.. stops.Stagnation.Points.Select((point, index) => Snare.About(stops, point, index))];
+    }
+
+    private Tracer(PathStops stops, double tolerance, Snare[] snares)
+    {
+        _stops = stops;
+        _tolerance = tolerance;
+        _snares = snares;
     }
 
     /// <summary>Where paths end.</summary>
     public PathStops Stops => _stops;
+
+    /// <summary>Follows paths past stagnation points, however near they come.</summary>
+    internal Tracer PastStagnation() => new(_stops, _tolerance, [.. _snares.Select(snare => snare with { Radius = 0 })]);
 
     /// <summary>Follows one particle.</summary>
     /// <param name="from">Start, m.</param>
@@ -76,7 +97,7 @@ public sealed class Tracer
     /// <param name="leaving">Index of the stagnation point that the path leaves, so that it does not end there; -1 for none.</param>
     public PathEnd Trace(Complex from, Sense sense, double longest, IPathSink? sink, int leaving = -1)
     {
-        Walk walk = new(_stops, _snares, from, sense, longest, sink, leaving);
+        Walk walk = new(_stops, _snares, _tolerance, from, sense, longest, sink, leaving);
         return walk.ToEnd();
     }
 }

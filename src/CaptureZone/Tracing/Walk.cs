@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.Intrinsics;
 using CaptureZone.Flow;
 
 namespace CaptureZone.Tracing;
@@ -10,16 +11,16 @@ internal ref struct Walk
     private const double ShareOfSingular = 0.5;
 
     /// <summary>Longest step, as a share of the distance to the nearest stagnation point, where the direction jumps.</summary>
-    private const double ShareOfStagnation = 0.9;
+    private const double ShareOfStagnation = 0.5;
 
     /// <summary>First step, as a share of the longest.</summary>
     private const double FirstShare = 0.3;
 
-    /// <summary>A step may grow by this factor and shrink by its inverse.</summary>
-    private const double MostGrowth = 6;
+    /// <summary>A step may grow by this factor, and shrink by its inverse, as a share of the longest.</summary>
+    private const double MostGrowth = 2;
 
     /// <summary>Safety factor of the choice of steps.</summary>
-    private const double Safety = 0.9;
+    private const double Safety = 0.8;
 
     /// <summary>Cosine between the path and the ray from the centre above which a far particle moves outward for good.</summary>
     private const double OutwardCosine = 0.2;
@@ -39,17 +40,24 @@ internal ref struct Walk
     private double _drift;
 
     internal Walk(
-        PathStops stops, ReadOnlySpan<Snare> snares, Complex from, Sense sense, double longest, IPathSink? sink, int leaving)
+        PathStops stops,
+        ReadOnlySpan<Snare> snares,
+        double tolerance,
+        Complex from,
+        Sense sense,
+        double longest,
+        IPathSink? sink,
+        int leaving)
     {
         _stops = stops;
         _field = stops.Field;
         _snares = snares;
         _sign = sense == Sense.Downstream ? 1 : -1;
         _longest = longest;
-        _stepper = new Stepper(_field, _sign);
+        _stepper = new Stepper(_field, _sign, tolerance);
         _vertices = new PathVertices(_field, _sign, sink);
         _leaving = leaving;
-        _node = _stepper.NodeAt(from, 0, 0);
+        _node = _stepper.Start(from);
     }
 
     internal PathEnd ToEnd()
@@ -60,15 +68,16 @@ internal ref struct Walk
             return End(here);
         }
 
-        Span<double> work = stackalloc double[Stepper.Workspace];
-        double step = FirstShare * LongestStep(out _);
+        Span<Vector256<double>> work = stackalloc Vector256<double>[Stepper.Workspace];
+        double share = FirstShare;
         for (int i = 0; i < MostSteps; i++)
         {
-            step = Math.Min(step, LongestStep(out double clearance));
+            // The step is kept as a share of the longest one, which shrinks toward a well as the step must.
+            double step = share * LongestStep(out double clearance);
             Node next = _stepper.Step(_node, step, clearance, work, out double error);
             if (!(error <= 1) || double.IsNaN(next.Slowness))
             {
-                step *= double.IsFinite(error) ? Factor(error) : 1 / MostGrowth;
+                share *= double.IsFinite(error) ? Factor(error) : 1 / MostGrowth;
                 continue;
             }
 
@@ -79,7 +88,7 @@ internal ref struct Walk
                 return End(end);
             }
 
-            step *= Factor(error);
+            share = Math.Min(1, share * Factor(error));
         }
 
         throw new InvalidOperationException("A path took more steps than any path takes.");
@@ -123,7 +132,7 @@ internal ref struct Walk
     }
 
     /// <summary>Whether the path ends within a step that was computed; if so the step is cut to end there exactly.</summary>
-    private readonly Fate? FateOnTheWay(ref Node next, Span<double> work)
+    private readonly Fate? FateOnTheWay(ref Node next, Span<Vector256<double>> work)
     {
         Fate? fate = null;
         if (ScreenAt(next.At) is { } screen)
@@ -214,31 +223,27 @@ internal ref struct Walk
     }
 
     /// <summary>
-    /// Cuts a step to where what remains before a mark is zero, by regula falsi with the Illinois rule; every trial is a step of
-    /// its own, so that the end is as exact as the method.
+    /// Cuts a step to where what remains before a mark is zero: Newton's method within a bracket, every trial a step of its own, so that
+    /// the end is as exact as the method; the last correction, too short for any error, goes straight on.
     /// </summary>
-    private readonly void Cut(ref Node next, in Mark mark, Span<double> work)
+    private readonly void Cut(ref Node next, in Mark mark, Span<Vector256<double>> work)
     {
         double low = 0, atLow = mark.Remaining(_node), high = next.Length - _node.Length, atHigh = mark.Remaining(next);
-        double enough = Mark.Enough * (atLow - atHigh);
-        for (int i = 0; i < Mark.MostTrials && atLow > 0 && high > low; i++)
+        double straight = Mark.StraightShare * high;
+        double trial = high * (atLow / (atLow - atHigh));
+        for (int i = 0; i < Mark.MostTrials && atLow > 0 && trial > low && trial < high; i++)
         {
-            double trial = low + (high - low) * (atLow / (atLow - atHigh));
             next = _stepper.Step(_node, trial, 1, work, out _);
-            double left = mark.Remaining(next);
-            if (Math.Abs(left) <= enough)
+            double left = mark.Remaining(next), ahead = left / mark.Rate(next);
+            if (Math.Abs(ahead) <= straight)
             {
+                next = _stepper.Straight(next, ahead);
                 return;
             }
 
-            if (left > 0)
-            {
-                (low, atLow, atHigh) = (trial, left, atHigh / 2);
-            }
-            else
-            {
-                (high, atHigh, atLow) = (trial, left, atLow / 2);
-            }
+            (low, high) = left > 0 ? (trial, high) : (low, trial);
+            trial += ahead;
+            trial = trial > low && trial < high ? trial : (low + high) / 2;
         }
     }
 }

@@ -92,8 +92,8 @@ public sealed record FaceMap(
             return null;
         }
 
-        Fate origin = topology.Tracer.Trace(inside, Sense.Upstream, double.PositiveInfinity, null).Fate;
-        Fate destination = topology.Tracer.Trace(inside, Sense.Downstream, double.PositiveInfinity, null).Fate;
+        Fate origin = topology.Scout.Trace(inside, Sense.Upstream, double.PositiveInfinity, null).Fate;
+        Fate destination = topology.Scout.Trace(inside, Sense.Downstream, double.PositiveInfinity, null).Fate;
         return new Face(polygon, origin, destination);
     }
 }

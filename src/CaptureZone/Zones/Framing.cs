@@ -2,6 +2,7 @@ using System.Numerics;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Flow;
 using CaptureZone.Topology;
+using CaptureZone.Tracing;
 using NetTopologySuite.Geometries;
 
 namespace CaptureZone.Zones;
@@ -17,7 +18,7 @@ internal sealed record Framing(Envelope Extent, double Radius)
     /// <summary>The shorter side of a chosen extent is at least this share of the longer.</summary>
     private const double LeastAspect = 0.6;
 
-    /// <summary>Stagnation points farther off than this many diameters of wells and plumes do not widen a chosen extent.</summary>
+    /// <summary>What lies farther off than this many diameters of wells and plumes widens neither a chosen extent nor the circle.</summary>
     private const double FarPoints = 30;
 
     /// <summary>The circle reaches beyond everything by this factor.</summary>
@@ -32,7 +33,8 @@ internal sealed record Framing(Envelope Extent, double Radius)
     internal static Framing Of(FlowField field, Questions questions)
     {
         StagnationSet stagnation = StagnationFinder.Find(field);
-        Complex centre = Tracing.PathStops.Of(field, stagnation).Centre;
+        PathStops stops = PathStops.Of(field, stagnation);
+        Complex centre = stops.Centre;
         Envelope things = new();
         foreach (Well well in field.System.Wells)
         {
@@ -61,6 +63,14 @@ internal sealed record Framing(Envelope Extent, double Radius)
         Envelope extent = questions.Extent ?? Roomy(all);
         all.ExpandToInclude(extent);
         double radius = Corners(all).Max(corner => Complex.Abs(corner - centre));
+
+        // Beside the wells no zone reaches farther: half of all that they move, spread over the regional flow.
+        double widest = stops.Diameter / 2 + stops.TotalRate / (2 * Complex.Abs(field.UniformDischarge));
+        if (widest <= FarPoints * Math.Max(things.Diameter, EmptySite))
+        {
+            radius = Math.Max(radius, widest);
+        }
+
         return new Framing(extent, Reach * radius);
     }
 

@@ -28,7 +28,7 @@ public sealed record ArrivalTimes(double P5, double P50, double P95);
 /// <param name="Margin">From its outline to the nearest edge of that zone, m; negative where it sticks out, by the farthest point; null without a zone.</param>
 /// <param name="MarginSide">The same across the regional flow; null where no edge lies that way.</param>
 /// <param name="MarginDowngradient">The same toward the stagnation points; null where no edge lies that way.</param>
-/// <param name="MarginShare">Clean water on its tighter side, of the containment pumping; null where there is no stream function or no edge.</param>
+/// <param name="MarginShare">Clean water on its tighter side, of the containment pumping; null where there is no stream function or no edge, or where it sticks out.</param>
 /// <param name="CapturedBy">By containment well, largest first.</param>
 /// <param name="EscapesTo">Where the rest goes, largest first.</param>
 /// <param name="Arrival">Null when nothing is captured.</param>

@@ -35,9 +35,7 @@ internal static class WaterOrigins
         ];
         if (arriving.Length == 0)
         {
-            Complex start = screen.At + screen.Radius;
-            Fate origin = topology.Tracer.Trace(start, Sense.Upstream, double.PositiveInfinity, null).Fate;
-            return [new ScreenStretch(0, 2 * Math.PI, screen.Rate, origin, null, null)];
+            return [new ScreenStretch(0, 2 * Math.PI, screen.Rate, OnlyOrigin(topology, screen), null, null)];
         }
 
         ImmutableArray<ScreenStretch>.Builder stretches = ImmutableArray.CreateBuilder<ScreenStretch>();
@@ -66,6 +64,20 @@ internal static class WaterOrigins
                 .Select(group => new SourceShare(group.Key, group.Sum(part => part.Inflow), group.Sum(part => part.Inflow) / total))
                 .OrderByDescending(share => share.Rate),
         ];
+    }
+
+    /// <summary>
+    /// The origin of all that enters a screen at which no dividing branch arrives. Of an equal pair without regional flow one
+    /// streamline goes off to infinity all the same: no two starts are both on it.
+    /// </summary>
+    private static Fate OnlyOrigin(FlowTopology topology, Screen screen)
+    {
+        Fate east = OriginAt(0);
+        return east.Kind == FateKind.Injection ? east : OriginAt(Math.PI / 2);
+
+        Fate OriginAt(double angle) => topology.Tracer
+            .Trace(screen.At + Complex.FromPolarCoordinates(screen.Radius, angle), Sense.Upstream, double.PositiveInfinity, null)
+            .Fate;
     }
 
     private static double AngleAt(Screen screen, DividingBranch branch) => (branch.End.At - screen.At).Phase;

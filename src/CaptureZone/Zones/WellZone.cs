@@ -16,7 +16,10 @@ public sealed record SourceShare(Fate Source, double Rate, double Share);
 /// <param name="Area">Its area, m2; null when it is open to far upstream.</param>
 /// <param name="AreaInExtent">Its area within the extent, m2.</param>
 /// <param name="Open">Whether it reaches without end.</param>
-/// <param name="WidthAtWell">Its extent on the line through the well across the regional flow, m; null without regional flow.</param>
+/// <param name="WidthAtWell">
+/// Its extent on the line through the well across the regional flow, m; null without regional flow, or with one so weak that the
+/// calculation's circle cuts it off.
+/// </param>
 /// <param name="WidthUpgradient">The limit of its width far upstream, m: regional water over Q0; null without regional flow.</param>
 /// <param name="StagnationDistance">From the well to the nearest saddle on the zone's edge, m; null where there is none.</param>
 /// <param name="WaterFrom">Where the water comes from, largest first.</param>

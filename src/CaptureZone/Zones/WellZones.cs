@@ -42,7 +42,10 @@ internal static class WellZones
             ZoneEdges.Leak(edges.Intersection(extent), topology.Field, at => IsInScreen(topology.Stops, at)) / screen.Rate);
     }
 
-    /// <summary>Extent of a zone on the line through the well across the regional flow, from outermost edge to outermost edge.</summary>
+    /// <summary>
+    /// Extent of a zone on the line through the well across the regional flow, from outermost edge to outermost edge; null where the
+    /// frame cuts it off.
+    /// </summary>
     private static double? WidthAt(FlowField field, Complex well, Geometry zone, FaceMap map)
     {
         Complex flow = field.UniformDischarge;
@@ -50,7 +53,7 @@ internal static class WellZones
         LineString line = GeometryKit.Factory.CreateLineString(
             [GeometryKit.ToCoordinate(well - across), GeometryKit.ToCoordinate(well + across)]);
         Coordinate[] met = line.Intersection(zone).Coordinates;
-        if (met.Length < 2)
+        if (met.Length < 2 || met.Any(at => ZoneEdges.IsOnFrame(at, map)))
         {
             return null;
         }

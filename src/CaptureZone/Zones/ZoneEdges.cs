@@ -41,6 +41,12 @@ internal static class ZoneEdges
     /// <param name="map">The circle.</param>
     internal static bool TouchFrame(Geometry zone, FaceMap map) => zone.Coordinates.Any(corner => IsOnFrame(corner, map));
 
+    /// <summary>Whether a place lies on the circle that frames the zones.</summary>
+    /// <param name="at">The place, m.</param>
+    /// <param name="map">The circle.</param>
+    internal static bool IsOnFrame(Coordinate at, FaceMap map) =>
+        Math.Abs(Complex.Abs(GeometryKit.ToComplex(at) - map.Centre) - map.Radius) < OnFrame * map.Radius;
+
     /// <summary>The integral of |normal discharge| along edges, m3/d: what leaks through a polygon that should be tight.</summary>
     /// <param name="edges">The edges.</param>
     /// <param name="field">The field.</param>
@@ -108,7 +114,4 @@ internal static class ZoneEdges
 
         run.Clear();
     }
-
-    private static bool IsOnFrame(Coordinate at, FaceMap map) =>
-        Math.Abs(Complex.Abs(GeometryKit.ToComplex(at) - map.Centre) - map.Radius) < OnFrame * map.Radius;
 }

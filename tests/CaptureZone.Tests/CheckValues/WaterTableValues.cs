@@ -7,7 +7,7 @@ using CaptureZone.Tests.Flow;
 namespace CaptureZone.Tests.CheckValues;
 
 /// <summary>
-/// Water-table and mixed flow by the discharge potential. Sources: D.L. Grubb, Ground Water 31(1), 27-32, 1993, doi
+/// Water-table and mixed flow by the discharge potential. Sources: S. Grubb, Ground Water 31(1), 27-32, 1993, doi
 /// 10.1111/j.1745-6584.1993.tb00824.x (abstract seen, equations from memory and re-derived); O.D.L. Strack, Groundwater
 /// Mechanics, 1989 (from memory). The numbers are computed from the published formulas; tolerance 1e-6 relative.
 /// Regional flow toward -x, the well at the origin.

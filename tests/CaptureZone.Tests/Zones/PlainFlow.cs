@@ -1,7 +1,6 @@
 using System.Numerics;
 using CaptureZone.Aquifers;
 using CaptureZone.Elements.Wells;
-using CaptureZone.Tracing;
 
 namespace CaptureZone.Tests.Zones;
 

@@ -1,7 +1,5 @@
-using System.Collections.Immutable;
 using System.Numerics;
 using CaptureZone.Aquifers;
-using CaptureZone.Elements;
 using CaptureZone.Elements.Regional;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Zones;

@@ -92,15 +92,8 @@ public sealed class WellBank : IBank
     /// <inheritdoc/>
     public double FluxAcross(Complex a, Complex b, ReadOnlySpan<double> strength)
     {
-        double flux = 0;
-        for (int j = 0; j < strength.Length; j++)
-        {
-            double ax = a.Real - _x[j], ay = a.Imaginary - _y[j];
-            double bx = b.Real - _x[j], by = b.Imaginary - _y[j];
-            flux -= strength[j] * Math.Atan2(ax * by - ay * bx, ax * bx + ay * by);
-        }
-
-        return flux * WellPlaces.OneOverTwoPi;
+        double sum = WellsAcrossSegment.RateTimesAngle(Places, a.Real, a.Imaginary, b.Real, b.Imaginary, strength);
+        return -sum * WellPlaces.OneOverTwoPi;
     }
 
     /// <inheritdoc/>

@@ -42,4 +42,20 @@ internal readonly ref struct WellPlaces(ReadOnlySpan<double> x, ReadOnlySpan<dou
         Vector128<double> low = partial.GetLower(), high = partial.GetUpper();
         return (low.GetElement(0) + low.GetElement(1)) + (high.GetElement(0) + high.GetElement(1));
     }
+
+    /// <summary>Four values from an index on.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Vector256<double> Load(ReadOnlySpan<double> from, int j) => Vector256.Create(from.Slice(j, Lanes));
+
+    /// <summary>The strengths of four wells; zero past the last.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Vector256<double> LoadStrength(ReadOnlySpan<double> strength, int j) =>
+        j + Lanes <= strength.Length ? Load(strength, j) : LoadLast(strength[j..]);
+
+    private static Vector256<double> LoadLast(ReadOnlySpan<double> rest) => rest.Length switch
+    {
+        1 => Vector256.CreateScalar(rest[0]),
+        2 => Vector128.Create(rest).ToVector256(),
+        _ => Vector256.Create(Vector128.Create(rest), Vector128.CreateScalar(rest[2])),
+    };
 }

@@ -34,7 +34,7 @@ internal static class WellsAtOnePoint
         Vector256<double> px = Vector256.Create(x), py = Vector256.Create(y), sum = default;
         for (int j = 0; j < strength.Length; j += WellPlaces.Lanes)
         {
-            Vector256<double> dx = px - Load(wells.X, j), dy = py - Load(wells.Y, j), q = LoadStrength(strength, j);
+            Vector256<double> dx = px - WellPlaces.Load(wells.X, j), dy = py - WellPlaces.Load(wells.Y, j), q = WellPlaces.LoadStrength(strength, j);
             Vector256<double> term = q * Vector256.Log(dx * dx + dy * dy);
             sum += Vector256.AndNot(term, Vector256.Equals(q, Vector256<double>.Zero));
         }
@@ -47,8 +47,8 @@ internal static class WellsAtOnePoint
         Vector256<double> px = Vector256.Create(x), py = Vector256.Create(y), sumX = default, sumY = default;
         for (int j = 0; j < strength.Length; j += WellPlaces.Lanes)
         {
-            Vector256<double> dx = px - Load(wells.X, j), dy = py - Load(wells.Y, j);
-            Vector256<double> u = LoadStrength(strength, j) * WellPlaces.Reciprocal(dx * dx + dy * dy);
+            Vector256<double> dx = px - WellPlaces.Load(wells.X, j), dy = py - WellPlaces.Load(wells.Y, j);
+            Vector256<double> u = WellPlaces.LoadStrength(strength, j) * WellPlaces.Reciprocal(dx * dx + dy * dy);
             sumX += u * dx;
             sumY += u * dy;
         }
@@ -64,9 +64,9 @@ internal static class WellsAtOnePoint
         Vector256<double> sumX = default, sumY = default, sumXX = default, sumXY = default;
         for (int j = 0; j < strength.Length; j += WellPlaces.Lanes)
         {
-            Vector256<double> dx = px - Load(wells.X, j), dy = py - Load(wells.Y, j);
+            Vector256<double> dx = px - WellPlaces.Load(wells.X, j), dy = py - WellPlaces.Load(wells.Y, j);
             Vector256<double> reciprocal = WellPlaces.Reciprocal(dx * dx + dy * dy);
-            Vector256<double> u = LoadStrength(strength, j) * reciprocal, ux = u * dx, uy = u * dy;
+            Vector256<double> u = WellPlaces.LoadStrength(strength, j) * reciprocal, ux = u * dx, uy = u * dy;
             sumX += ux;
             sumY += uy;
             sumXX += (ux * dx - uy * dy) * reciprocal;
@@ -84,19 +84,4 @@ internal static class WellsAtOnePoint
         into.Qxy += WellPlaces.Total(sumXY) * (2 * WellPlaces.OneOverTwoPi);
         into.Qyy -= qxx;
     }
-
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static Vector256<double> Load(ReadOnlySpan<double> from, int j) => Vector256.Create(from.Slice(j, WellPlaces.Lanes));
-
-    /// <summary>The strengths of four wells; zero past the last.</summary>
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static Vector256<double> LoadStrength(ReadOnlySpan<double> strength, int j) =>
-        j + WellPlaces.Lanes <= strength.Length ? Load(strength, j) : LoadLast(strength[j..]);
-
-    private static Vector256<double> LoadLast(ReadOnlySpan<double> rest) => rest.Length switch
-    {
-        1 => Vector256.CreateScalar(rest[0]),
-        2 => Vector128.Create(rest).ToVector256(),
-        _ => Vector256.Create(Vector128.Create(rest), Vector128.CreateScalar(rest[2])),
-    };
 }

@@ -62,8 +62,7 @@ public static class PlumeJudge
                 .ThenBy(share => share.Fate.Feature),
         ];
         double inside = shares.Where(share => isChosen(share.Fate)).Sum(share => share.Fraction);
-        DividingBranch[] bounding = [.. Bounding(topology, isChosen)];
-        PlumeMargins margins = PlumeMargins.Of(topology, map, joint, bounding, plume, captured);
+        PlumeMargins margins = PlumeMargins.Of(topology, map, joint, plume, captured, isChosen);
         return new PlumeAnswer(
             index,
             captured,
@@ -104,7 +103,7 @@ public static class PlumeJudge
             {
                 if (locator.Locate(new Coordinate(x, y)) == Location.Interior)
                 {
-                    PathEnd end = topology.Tracer.Trace(new Complex(x, y), Sense.Downstream, double.PositiveInfinity, null);
+                    PathEnd end = topology.Scout.Trace(new Complex(x, y), Sense.Downstream, double.PositiveInfinity, null);
                     if (isChosen(end.Fate))
                     {
                         times.Add(end.Time * retardation);

@@ -1,5 +1,6 @@
 using System.Numerics;
 using CaptureZone.Topology;
+using CaptureZone.Tracing;
 using NetTopologySuite.Densify;
 using NetTopologySuite.Geometries;
 using NetTopologySuite.Simplify;
@@ -10,7 +11,7 @@ namespace CaptureZone.Zones.Plumes;
 /// <param name="Nearest">To the nearest edge, m.</param>
 /// <param name="Side">Across the regional flow, m.</param>
 /// <param name="Downgradient">With the regional flow, m.</param>
-/// <param name="Share">Clean water on the tighter side, of the containment pumping.</param>
+/// <param name="Share">Clean water on the tighter side, of the containment pumping; null when it sticks out.</param>
 internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downgradient, double? Share)
 {
     /// <summary>Points on the plume's outline, about, between its corners.</summary>
@@ -21,7 +22,7 @@ internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downg
 
     /// <summary>The margins of one plume.</summary>
     internal static PlumeMargins Of(
-        FlowTopology topology, FaceMap map, Geometry joint, IReadOnlyList<DividingBranch> bounding, Plume plume, bool captured)
+        FlowTopology topology, FaceMap map, Geometry joint, Plume plume, bool captured, Func<Fate, bool> isChosen)
     {
         if (joint.IsEmpty)
         {
@@ -35,6 +36,7 @@ internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downg
             return new PlumeMargins(null, null, null, null);
         }
 
+        double pumping = topology.Stops.Screens.Where(screen => isChosen(new Fate(FateKind.Well, screen.Well))).Sum(screen => Math.Max(screen.Rate, 0));
         Geometry outside = captured ? GeometryKit.Factory.CreatePolygon() : GeometryKit.Difference(plume.Outline, joint);
         Complex[] outline = OutlineOf(captured ? plume.Outline : outside);
         double nearest = captured
@@ -42,7 +44,7 @@ internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downg
             : -outline.Select(at => DistanceOutside(at, edges)).DefaultIfEmpty(0).Max();
         Complex flow = topology.Field.UniformDischarge;
         Complex? direction = flow == Complex.Zero ? null : flow / Complex.Abs(flow);
-        double? share = TighterShare(topology, bounding, outline, captured, tolerance);
+        double? share = captured && pumping > 0 ? CleanWater.Least(topology, outline, isChosen) / pumping : null;
         return direction is { } along
             ? new PlumeMargins(
                 nearest,
@@ -103,23 +105,5 @@ internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downg
         }
 
         return first;
-    }
-
-    /// <summary>The flow between the outline and the bounding streamline nearest to each of its points.</summary>
-    private static double? TighterShare(
-        FlowTopology topology, IReadOnlyList<DividingBranch> bounding, Complex[] outline, bool captured, double tolerance)
-    {
-        double pumping = topology.Stops.Screens
-            .Where(screen => topology.Field.System.Wells[screen.Well].Purpose == Elements.Wells.WellPurpose.Containment)
-            .Sum(screen => Math.Max(screen.Rate, 0));
-        if (bounding.Count == 0 || outline.Length == 0 || pumping == 0)
-        {
-            return null;
-        }
-
-        Polyline[] lines = [.. bounding.Select(branch => new Polyline([.. Polyline.Thinned(branch, tolerance)]))];
-        IEnumerable<double> flows = outline.Select(at =>
-            Math.Abs(topology.Field.FluxAcross(lines.Select(line => line.FootOf(at)).MinBy(foot => foot.Distance).Nearest, at)));
-        return captured ? flows.Min() / pumping : -flows.Max() / pumping;
     }
 }

@@ -52,6 +52,9 @@ internal sealed class RayFan
     /// <summary>Divisions after which what double precision tells apart has been reached.</summary>
     private const int MostDivisions = 64;
 
+    /// <summary>More rays than any stretch needs: beyond, the outline is left as it is and its pore volume tells.</summary>
+    private const int MostRays = 5000;
+
     private readonly RayTracing _tracing;
     private readonly ImmutableArray<double> _times;
     private readonly ImmutableArray<double> _radii;
@@ -133,6 +136,7 @@ internal sealed class RayFan
     private void Divide(Ray a, Ray b, int depth)
     {
         if (depth >= MostDivisions
+            || _rays.Count >= MostRays
             || AllTimes(i => VolumeDiffers(a, b, i) <= VolumeShare && (IsClose(a, b, i) || Clinging(a, b, i) is not null)))
         {
             return;

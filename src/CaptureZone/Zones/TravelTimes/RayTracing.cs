@@ -16,7 +16,7 @@ internal sealed class RayTracing(FlowTopology topology, Screen screen, Immutable
     /// <summary>Courses tell how far neighbours are apart: a coarse resolution will do.</summary>
     private static readonly PathResolution CourseResolution = new(0.03, double.PositiveInfinity);
 
-    private readonly Tracer _tracer = topology.Tracer;
+    private readonly Tracer _tracer = topology.Scout;
 
     /// <summary>A ray that is launched from the screen.</summary>
     /// <param name="angle">Where it enters, radians counter-clockwise from east.</param>

@@ -19,10 +19,15 @@ internal static class TravelTimeZones
     /// <param name="topology">The dividing streamlines.</param>
     /// <param name="screen">The well's screen.</param>
     /// <param name="stretches">Stretches of the screen by origin.</param>
-    /// <param name="times">The times, d, increasing.</param>
+    /// <param name="times">The times, d, increasing; may be none.</param>
     internal static ImmutableArray<TravelTimeZone> Of(
         FlowTopology topology, Screen screen, ImmutableArray<ScreenStretch> stretches, ImmutableArray<double> times)
     {
+        if (times.IsEmpty)
+        {
+            return [];
+        }
+
         Aquifer aquifer = topology.Field.AquiferAt(screen.At);
         double thickness = aquifer.SaturatedThickness(topology.Field.FlowAt(screen.At + screen.Radius).Potential);
         ImmutableArray<double> radii =

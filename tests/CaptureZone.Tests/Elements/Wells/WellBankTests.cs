@@ -6,7 +6,7 @@ using CaptureZone.Tests.Flow;
 namespace CaptureZone.Tests.Elements.Wells;
 
 /// <summary>
-/// Bits and singular places. The plain sums below follow the order that docs/decisions/lanes-and-order-of-summation.md states;
+/// Bits and singular places. The plain sums below follow the order that docs/decisions/006-lanes-and-order-of-summation.md states;
 /// with DOTNET_EnableAVX2=0 or DOTNET_EnableHWIntrinsic=0 in the environment the same tests hold the paths without vectors to it.
 /// </summary>
 public sealed class WellBankTests
