@@ -15,7 +15,7 @@ public sealed class PlainFlow
     public const int None = -1;
 
     private const double StepShare = 0.12;
-    private const double LongestStepShare = 0.6;
+    private const double LongestStepShare = 0.2;
     private const double TrapMargin = 1.2;
     private const int MostSteps = 200_000;
 
