@@ -1,5 +1,4 @@
 using System.Numerics;
-using CaptureZone.Elements.Wells;
 using CaptureZone.Flow;
 using CaptureZone.Zones;
 using FsCheck.Xunit;

@@ -1,4 +1,3 @@
-using System.Numerics;
 using CaptureZone.Flow;
 using CaptureZone.Zones;
 using NetTopologySuite.Algorithm.Locate;
