@@ -14,7 +14,7 @@ namespace CaptureZone.Zones.Plumes;
 public static class PlumeJudge
 {
     /// <summary>A streamline that enters the plume by less than this share of its size touches it only.</summary>
-    private const double TouchShare = 1e-7;
+    private const double TouchShare = 1e-5;
 
     /// <summary>Shares of the plume's area below this are rounding.</summary>
     private const double LeastFraction = 1e-9;

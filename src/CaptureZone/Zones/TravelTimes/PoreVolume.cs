@@ -11,7 +11,7 @@ namespace CaptureZone.Zones.TravelTimes;
 internal static class PoreVolume
 {
     /// <summary>Triangles are halved until they are this small, as a share of the area.</summary>
-    private const double TriangleShare = 1e-4;
+    private const double TriangleShare = 1e-5;
 
     /// <summary>The volume, m3. Exact where the aquifer is confined all over the area; else by quadrature.</summary>
     /// <param name="area">The area.</param>
