@@ -45,7 +45,7 @@ public static class SiteAnalysis
 
         progress?.Report(new Step("stagnation points and dividing streamlines", 0.05));
         Framing framing = Framing.Of(field, questions);
-        FlowTopology topology = FlowTopology.Find(field, framing.Radius, framing.Extent, workers, cancel);
+        FlowTopology topology = FlowTopology.Find(field, framing.Reach, framing.Extent, workers, cancel);
 
         progress?.Report(new Step("capture zones", 0.3));
         FaceMap map = FaceMap.Build(topology, framing.Radius, workers);

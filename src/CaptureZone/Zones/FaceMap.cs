@@ -4,6 +4,7 @@ using CaptureZone.Flow;
 using CaptureZone.Topology;
 using CaptureZone.Tracing;
 using NetTopologySuite.Geometries;
+using NetTopologySuite.Geometries.Utilities;
 using NetTopologySuite.Operation.OverlayNG;
 using NetTopologySuite.Operation.Polygonize;
 using NetTopologySuite.Operation.Union;
@@ -67,18 +68,26 @@ public sealed record FaceMap(
 
     /// <summary>The zone from which water goes to one of some destinations.</summary>
     /// <param name="isChosen">Tells whether a destination is one of them.</param>
-    public Geometry ZoneOf(Func<Fate, bool> isChosen) => UnionOf(Faces.Where(face => isChosen(face.Destination)), 0);
+    public Geometry ZoneOf(Func<Fate, bool> isChosen) =>
+        UnionOf(Faces.Where(face => isChosen(face.Destination)), SliverShare * Math.PI * Radius * Radius);
 
     private static ImmutableDictionary<Fate, Geometry> ZonesOf(ImmutableArray<Face> faces, double smallest) =>
         faces.GroupBy(face => face.Destination).ToImmutableDictionary(group => group.Key, group => UnionOf(group, smallest));
 
-    /// <summary>Faces meet in the same vertices all along their common edges: their union only drops these edges.</summary>
+    /// <summary>
+    /// Faces meet in the same vertices all along their common edges: their union only drops these edges. Where two lines run together
+    /// a sliver that is no face may be left between faces, and a ring that touches itself.
+    /// </summary>
     private static Geometry UnionOf(IEnumerable<Face> faces, double smallest)
     {
         Geometry[] parts = [.. faces.Select(face => face.Polygon)];
-        return parts.Length == 0
-            ? GeometryKit.Factory.CreatePolygon()
-            : GeometryKit.Areas(CoverageUnion.Union(GeometryKit.Factory.BuildGeometry(parts)), smallest);
+        if (parts.Length == 0)
+        {
+            return GeometryKit.Factory.CreatePolygon();
+        }
+
+        Geometry union = CoverageUnion.Union(GeometryKit.Factory.BuildGeometry(parts));
+        return GeometryKit.Areas(union.IsValid ? union : GeometryFixer.Fix(union), smallest);
     }
 
     private static LineString LineOf(DividingBranch branch) =>

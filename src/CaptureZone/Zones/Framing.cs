@@ -1,4 +1,5 @@
 using System.Numerics;
+using CaptureZone.Aquifers;
 using CaptureZone.Elements.Wells;
 using CaptureZone.Flow;
 using CaptureZone.Topology;
@@ -10,7 +11,8 @@ namespace CaptureZone.Zones;
 /// <summary>The extent of clipped output, and the circle within which zones are computed so that the extent cuts nothing off.</summary>
 /// <param name="Extent">The extent, m.</param>
 /// <param name="Radius">Radius of the circle about the site's centre, m.</param>
-internal sealed record Framing(Envelope Extent, double Radius)
+/// <param name="Reach">Radius within which dividing streamlines are needed, m: travel-time zones may go beyond the circle.</param>
+internal sealed record Framing(Envelope Extent, double Radius, double Reach)
 {
     /// <summary>Room round what must show, as a share of its size.</summary>
     private const double Room = 0.15;
@@ -22,7 +24,7 @@ internal sealed record Framing(Envelope Extent, double Radius)
     private const double FarPoints = 30;
 
     /// <summary>The circle reaches beyond everything by this factor.</summary>
-    private const double Reach = 1.25;
+    private const double RoomBeyond = 1.25;
 
     /// <summary>Half the side of the extent of a site with nothing in it, m.</summary>
     private const double EmptySite = 500;
@@ -71,7 +73,17 @@ internal sealed record Framing(Envelope Extent, double Radius)
             radius = Math.Max(radius, widest);
         }
 
-        return new Framing(extent, Reach * radius);
+        radius *= RoomBeyond;
+        return new Framing(extent, radius, radius + FarthestFront(field, stops, questions));
+    }
+
+    /// <summary>How far the water of the oldest travel-time zone comes, about: with the regional flow, and from all round, m.</summary>
+    private static double FarthestFront(FlowField field, PathStops stops, Questions questions)
+    {
+        Aquifer aquifer = field.Parameters.Aquifer;
+        double time = questions.TravelTimes.DefaultIfEmpty(0).Max();
+        double water = aquifer.Porosity * aquifer.SaturatedThickness(aquifer.PotentialOf(field.Parameters.Regional.Head));
+        return Complex.Abs(field.UniformDischarge) * time / water + Math.Sqrt(stops.TotalRate * time / (Math.PI * water));
     }
 
     private static Envelope Roomy(Envelope all)

@@ -215,7 +215,9 @@ internal static class Expectations
     {
         PlumeAnswer plume = Assert.Single(Run(site).Plumes);
         Assert.True(plume.Captured);
-        Assert.Equal(400 / (2 * Math.PI) - 20, plume.MarginDowngradient!.Value, 0.01);
+
+        // The edge is at x = y / tan(2 pi Q0 y / Q): nearest downstream of the plume's corners at y = +-20.
+        Assert.Equal(20 / Math.Tan(2 * Math.PI * 20 / 400) - 20, plume.MarginDowngradient!.Value, 1e-3);
         Assert.True(plume.Arrival!.P5 > 0);
     }
 

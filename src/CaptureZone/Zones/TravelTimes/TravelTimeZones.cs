@@ -29,7 +29,9 @@ internal static class TravelTimeZones
         }
 
         Aquifer aquifer = topology.Field.AquiferAt(screen.At);
-        double thickness = aquifer.SaturatedThickness(topology.Field.FlowAt(screen.At + screen.Radius).Potential);
+
+        // Not the thickness at the screen: where that all but runs dry, zones would seem wider than they are and be drawn too coarsely.
+        double thickness = aquifer.SaturatedThickness(aquifer.PotentialOf(topology.Field.Parameters.Regional.Head));
         ImmutableArray<double> radii =
             [.. times.Select(time => Math.Sqrt(screen.Rate * time / (Math.PI * aquifer.Porosity * thickness)))];
         RayTracing tracing = new(topology, screen, times);
