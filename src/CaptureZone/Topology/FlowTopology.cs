@@ -97,6 +97,28 @@ public sealed class FlowTopology
         return Branches[first + (order + CountAt(saddle)) % CountAt(saddle)];
     }
 
+    /// <summary>
+    /// What a branch goes on as that ends in another stagnation point: the water beside it, on the side meant, turns there along the
+    /// next branch of that point.
+    /// </summary>
+    /// <param name="branch">A branch that ends in a stagnation point.</param>
+    /// <param name="turn">1 or -1: next counter-clockwise or clockwise of the way of arrival, seen from that point.</param>
+    internal DividingBranch Beyond(DividingBranch branch, int turn)
+    {
+        int saddle = branch.End.Fate.Feature;
+        Complex centre = Points[saddle].At, arrival = branch.End.At - centre;
+        int best = 0;
+        double bestCosine = double.NegativeInfinity;
+        for (int order = branch.IsStable ? 0 : 1; order < CountAt(saddle); order += 2)
+        {
+            Complex direction = BranchAt(saddle, order).Launch - centre;
+            double cosine = (direction * Complex.Conjugate(arrival)).Real / (Complex.Abs(direction) * Complex.Abs(arrival));
+            (best, bestCosine) = cosine > bestCosine ? (order, cosine) : (best, bestCosine);
+        }
+
+        return BranchAt(saddle, best + turn);
+    }
+
     private int CountAt(int saddle) => 2 * (Points[saddle].Multiplicity + 1);
 
     /// <summary>

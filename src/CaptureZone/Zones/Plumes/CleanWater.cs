@@ -44,6 +44,12 @@ internal static class CleanWater
         DividingBranch arriving = topology.BranchAt(edge.Saddle, edge.Order + turn);
         for (int passed = 0; passed <= topology.Branches.Length; passed++)
         {
+            if (arriving.End.Fate.Kind == FateKind.Stagnation)
+            {
+                arriving = topology.Beyond(arriving, turn);
+                continue;
+            }
+
             if (arriving.End.Fate.Kind != FateKind.Well || !intakes.TryGetValue(arriving.End.Fate.Feature, out Intake? intake))
             {
                 return null;

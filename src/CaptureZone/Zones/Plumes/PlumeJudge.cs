@@ -19,6 +19,9 @@ public static class PlumeJudge
     /// <summary>Shares of the plume's area below this are rounding.</summary>
     private const double LeastFraction = 1e-9;
 
+    /// <summary>How far from the plume's middle to its corners a place is looked at: little, so that it lies within the plume.</summary>
+    private const double CornerShare = 1e-3;
+
     /// <summary>Points of the plume, about, from which arrival times are taken.</summary>
     private const int ArrivalPoints = 1000;
 
@@ -38,8 +41,21 @@ public static class PlumeJudge
             }
         }
 
-        Complex inside = GeometryKit.ToComplex(plume.Outline.InteriorPoint.Coordinate);
-        return isChosen(topology.Tracer.Trace(inside, Sense.Downstream, double.PositiveInfinity, null).Fate);
+        return isChosen(FateWithin(topology, plume.Outline));
+    }
+
+    /// <summary>
+    /// Where water of a plume goes through which no bounding streamline passes. A streamline that ends in a stagnation point does not
+    /// tell: symmetry may put one through the plume's middle, so that the way from there to its corners is looked at as well.
+    /// </summary>
+    private static Fate FateWithin(FlowTopology topology, Polygon outline)
+    {
+        Complex middle = GeometryKit.ToComplex(outline.InteriorPoint.Coordinate);
+        return outline.ExteriorRing.Coordinates
+            .Select(corner => middle + (GeometryKit.ToComplex(corner) - middle) * CornerShare)
+            .Prepend(middle)
+            .Select(at => topology.Tracer.Trace(at, Sense.Downstream, double.PositiveInfinity, null).Fate)
+            .FirstOrDefault(fate => fate.Kind != FateKind.Stagnation, new Fate(FateKind.Stagnation));
     }
 
     /// <summary>The whole verdict with its figures.</summary>

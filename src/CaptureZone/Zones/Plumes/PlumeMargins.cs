@@ -3,6 +3,7 @@ using CaptureZone.Topology;
 using CaptureZone.Tracing;
 using NetTopologySuite.Densify;
 using NetTopologySuite.Geometries;
+using NetTopologySuite.Operation.Distance;
 using NetTopologySuite.Simplify;
 
 namespace CaptureZone.Zones.Plumes;
@@ -38,10 +39,11 @@ internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downg
 
         double pumping = topology.Stops.Screens.Where(screen => isChosen(new Fate(FateKind.Well, screen.Well))).Sum(screen => Math.Max(screen.Rate, 0));
         Geometry outside = captured ? GeometryKit.Factory.CreatePolygon() : GeometryKit.Difference(plume.Outline, joint);
-        Complex[] outline = OutlineOf(captured ? plume.Outline : outside);
+        Complex[] outline = OutlineOf(captured ? plume.Outline : DouglasPeuckerSimplifier.Simplify(outside, tolerance));
+        IndexedFacetDistance toEdges = new(edges);
         double nearest = captured
-            ? plume.Outline.Distance(edges)
-            : -outline.Select(at => DistanceOutside(at, edges)).DefaultIfEmpty(0).Max();
+            ? toEdges.Distance(plume.Outline)
+            : -outline.Select(at => DistanceOutside(at, toEdges)).DefaultIfEmpty(0).Max();
         Complex flow = topology.Field.UniformDischarge;
         Complex? direction = flow == Complex.Zero ? null : flow / Complex.Abs(flow);
         double? share = captured && pumping > 0 ? CleanWater.Least(topology, outline, isChosen) / pumping : null;
@@ -55,7 +57,7 @@ internal sealed record PlumeMargins(double? Nearest, double? Side, double? Downg
     }
 
     /// <summary>Distance of a point of the part that sticks out to the zone's edges; 0 on the cut itself.</summary>
-    private static double DistanceOutside(Complex at, Geometry edges) =>
+    private static double DistanceOutside(Complex at, IndexedFacetDistance edges) =>
         edges.Distance(GeometryKit.Factory.CreatePoint(GeometryKit.ToCoordinate(at)));
 
     private static Complex[] OutlineOf(Geometry area) =>

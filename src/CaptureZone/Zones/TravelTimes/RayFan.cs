@@ -35,7 +35,10 @@ internal sealed class RayFan
     /// <summary>Angles this close on the screen are not divided there, radians.</summary>
     private const double FineAngle = 1e-3;
 
-    /// <summary>Neighbours are that far apart where a ray is launched between them, as a share of the smallest zone's radius.</summary>
+    /// <summary>
+    /// Neighbours are that far apart where a ray is launched between them, as a share of the smallest zone's radius or of the distance
+    /// from the well to a side's stagnation point, the smaller: farther past that point a middle need not lie between them.
+    /// </summary>
     private const double LaunchShare = 5e-3;
 
     /// <summary>
@@ -60,16 +63,18 @@ internal sealed class RayFan
     private readonly ImmutableArray<double> _radii;
     private readonly Polyline[] _chains;
     private readonly double _middle;
+    private readonly double _toStagnation;
     private readonly List<Ray> _rays = [];
 
     private RayFan(
-        RayTracing tracing, ImmutableArray<double> times, ImmutableArray<double> radii, Polyline[] chains, ScreenStretch stretch)
+        RayTracing tracing, ImmutableArray<double> times, ImmutableArray<double> radii, Polyline[] chains, ScreenStretch stretch, double toStagnation)
     {
         _tracing = tracing;
         _times = times;
         _radii = radii;
         _chains = chains;
         _middle = (stretch.From + stretch.To) / 2;
+        _toStagnation = toStagnation;
     }
 
     /// <summary>The rays, the sides' own first and last.</summary>
@@ -87,7 +92,11 @@ internal sealed class RayFan
         Polyline[] chains = stretch is { Begin: { } begin, End: { } end }
             ? [SideChain.Of(topology, begin, -1, ChainShare * radii[0]), SideChain.Of(topology, end, 1, ChainShare * radii[0])]
             : [];
-        RayFan fan = new(tracing, times, radii, chains, stretch);
+        double toStagnation = new[] { stretch.Begin, stretch.End }.OfType<DividingBranch>()
+            .Select(side => Complex.Abs(side.Points[0].At - side.Points[^1].At))
+            .DefaultIfEmpty(double.PositiveInfinity)
+            .Min();
+        RayFan fan = new(tracing, times, radii, chains, stretch, toStagnation);
         fan.Fill(stretch);
         return fan;
     }
@@ -242,7 +251,7 @@ internal sealed class RayFan
     /// <summary>Places on two neighbours, the first from the well outward where these are far enough apart.</summary>
     private (Complex First, Complex Second)? WherePartedLittle(Ray a, Ray b)
     {
-        double apart = LaunchShare * _radii[0];
+        double apart = LaunchShare * Math.Min(_radii[0], _toStagnation);
         double[] times = [.. a.Course.Concat(b.Course).Select(point => point.Time).Where(time => time > 0 && double.IsFinite(time)).Order()];
         for (int i = 0, stride = 1; i < times.Length; i++)
         {

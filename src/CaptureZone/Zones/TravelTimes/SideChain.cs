@@ -30,28 +30,9 @@ internal static class SideChain
                 break;
             }
 
-            next = BeyondConnection(topology, next, turn);
+            next = topology.Beyond(next, turn);
         }
 
         return new Polyline([.. vertices]);
-    }
-
-    /// <summary>A branch that comes out of another stagnation point goes on along what flows into that point on the same side.</summary>
-    private static DividingBranch BeyondConnection(FlowTopology topology, DividingBranch branch, int turn)
-    {
-        int saddle = branch.End.Fate.Feature;
-        Complex centre = topology.Points[saddle].At;
-        Complex arrival = branch.End.At - centre;
-        int count = 2 * (topology.Points[saddle].Multiplicity + 1);
-        int best = 0;
-        double bestCosine = double.NegativeInfinity;
-        for (int order = 0; order < count; order += 2)
-        {
-            Complex direction = topology.BranchAt(saddle, order).Launch - centre;
-            double cosine = (direction * Complex.Conjugate(arrival)).Real / (Complex.Abs(direction) * Complex.Abs(arrival));
-            (best, bestCosine) = cosine > bestCosine ? (order, cosine) : (best, bestCosine);
-        }
-
-        return topology.BranchAt(saddle, best + turn);
     }
 }
