@@ -9,7 +9,7 @@ public sealed class StagnationPropertyTests
 {
     private const int Cases = 60;
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Moving_a_site_moves_its_stagnation_points(ushort seed, short east, short north)
     {
         Complex by = new(east, north);
@@ -20,7 +20,7 @@ public sealed class StagnationPropertyTests
             at => at + by);
     }
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Turning_a_site_turns_its_stagnation_points(ushort seed, byte angle)
     {
         Complex turn = Complex.FromPolarCoordinates(1, angle * 2 * Math.PI / 256);
@@ -31,7 +31,7 @@ public sealed class StagnationPropertyTests
             at => at * turn);
     }
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Scaling_a_site_and_its_rates_scales_its_stagnation_points(ushort seed, byte steps)
     {
         double scale = Math.Pow(10, steps / 64.0 - 2);
@@ -44,7 +44,7 @@ public sealed class StagnationPropertyTests
             scale);
     }
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Mirroring_a_site_mirrors_its_stagnation_points(ushort seed)
     {
         RandomWells wells = RandomWells.Of(seed);
@@ -54,7 +54,7 @@ public sealed class StagnationPropertyTests
             Complex.Conjugate);
     }
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Reversing_rates_and_flow_changes_no_stagnation_point(ushort seed)
     {
         RandomWells wells = RandomWells.Of(seed);

@@ -35,10 +35,10 @@ public sealed class RandomSiteTests(RandomSiteTests.Answered answered) : IClassF
     public void One_worker_and_two_give_the_same_bits() =>
         Assert.All(answered.Sites, site => Promises.AssertSameBits(site.Answers, Run(site.Site, new ThreadWorkers(2))));
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Any_site_keeps_every_promise(ushort seed) => AssertEveryPromise(seed);
 
-    [Property(MaxTest = ManyCases)]
+    [Property(MaxTest = ManyCases, Replay = Draws.Seed)]
     [Trait("Category", "Slow")]
     public void Any_of_many_sites_keeps_every_promise(ushort seed) => AssertEveryPromise(seed);
 

@@ -19,15 +19,15 @@ public sealed class SimilarityTests
     /// <summary>Distance from an edge to the other zone's, as a share of the disc's radius.</summary>
     private const double EdgeShare = 1e-4;
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Moving_a_site_moves_its_zones(ushort seed, short east, short north) => AssertSame(seed, 1, new Complex(east, north));
 
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Turning_a_site_turns_its_zones(ushort seed, byte angle) =>
         AssertSame(seed, Complex.FromPolarCoordinates(1, angle * 2 * Math.PI / 256), 0);
 
     /// <summary>Lengths, rates and times all change by one factor; drawdowns then only shrink when it is below 1.</summary>
-    [Property(MaxTest = Cases)]
+    [Property(MaxTest = Cases, Replay = Draws.Seed)]
     public void Scaling_a_site_and_its_rates_scales_its_zones(ushort seed, byte steps) =>
         AssertSame(seed, Math.Pow(10, -steps / 128.0), 0);
 

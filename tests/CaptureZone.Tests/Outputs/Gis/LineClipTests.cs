@@ -30,7 +30,7 @@ public sealed class LineClipTests
     public void A_line_that_touches_a_corner_gives_nothing() =>
         Assert.Equal("MULTILINESTRING EMPTY", Clip([new(-4, 4), new(4, -4)]));
 
-    [Property]
+    [Property(Replay = Draws.Seed)]
     public void The_parts_have_the_length_that_an_overlay_finds(int seed)
     {
         Random random = new(seed);

@@ -15,7 +15,7 @@ public sealed class LabelTests
     public void No_two_texts_of_a_map_share_a_place_and_none_leaves_the_sheet(ReportUnits units) =>
         AssertApart(new MapSheet(SampleReport.Create(units)));
 
-    [Property(MaxTest = 25)]
+    [Property(MaxTest = 25, Replay = Draws.Seed)]
     public void On_sites_with_clustered_wells_no_two_texts_share_a_place_and_every_well_has_its_name(int seed)
     {
         Report report = MapCases.Clustered(seed, 1 + (seed & 15));
