@@ -7,7 +7,7 @@ namespace CaptureZone.Tests.Zones;
 /// <summary>Every kind of <see cref="RandomSite"/> keeps every one of the <see cref="Promises"/>.</summary>
 public sealed class RandomSiteTests(RandomSiteTests.Answered answered) : IClassFixture<RandomSiteTests.Answered>
 {
-    private const int Sites = 14, Cases = 6, ManyCases = 120;
+    private const int Sites = 14, Cases = 6, ManyCases = 30;
 
     [Fact]
     public void Side_flow_and_pore_volumes_stay_within_a_thousandth_and_every_check_holds() =>
